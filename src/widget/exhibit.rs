@@ -1,0 +1,315 @@
+//! One element: its settings, its chosen day, its picture and its words.
+
+use js_sys::Object;
+use serde::Serialize;
+use wasm_bindgen::prelude::*;
+use web_sys::HtmlCanvasElement;
+
+use super::canvas::paint;
+use super::host::{Day, Host};
+use super::module::{thrown, write};
+use super::scene::Scene;
+use super::settings::{Attributes, Problem, Settings, Spot, View, first_day, last_day, read_date};
+use super::words::{self, State};
+use crate::chart::Viewport;
+use crate::error::Error;
+use crate::explain::Table;
+use crate::place::{self, Coordinate, Place};
+
+/// How far the Page keys move, in days.
+const PAGE_DAYS: i64 = 7;
+
+/// The thinking part of one `<wander-light>`; the element class owns one while it is in a page.
+#[wasm_bindgen]
+pub struct Exhibit {
+    host: Host,
+    settings: Settings,
+    /// First and last day shown.
+    frame: (Day, Day),
+    scene: Scene,
+    horizon_up: bool,
+    /// Width of the last drawing, for positions of the pointer.
+    width_css: f64,
+}
+
+/// What a visitor typed was taken, or why not.
+#[derive(Serialize)]
+struct Taken {
+    changed: bool,
+    message: Option<String>,
+}
+
+/// What the visitor chose, to be given back when the element returns to the page.
+#[derive(Serialize)]
+struct Choices {
+    date: String,
+    #[serde(skip_serializing_if = "Option::is_none")]
+    place: Option<String>,
+}
+
+#[wasm_bindgen]
+impl Exhibit {
+    /// An exhibit with the default settings.
+    #[wasm_bindgen(constructor)]
+    pub fn new() -> Result<Exhibit, JsValue> {
+        Self::build(&Attributes::new(JsValue::UNDEFINED))
+            .map(|(exhibit, _)| exhibit)
+            .map_err(thrown)
+    }
+
+    /// Reads all attributes anew; returns a list of `{ attribute, code, message }` of those that cannot be used.
+    pub fn configure(&mut self, attributes: JsValue) -> Result<JsValue, JsValue> {
+        let (exhibit, problems) = Self::build(&Attributes::new(attributes)).map_err(thrown)?;
+        let (horizon_up, width_css) = (self.horizon_up, self.width_css);
+        *self = exhibit;
+        self.width_css = width_css;
+        if horizon_up {
+            self.turn_disc(true)?;
+        }
+        write(&problems)
+    }
+
+    /// Draws on a canvas of the given size in CSS pixels.
+    pub fn draw(
+        &mut self,
+        canvas: HtmlCanvasElement,
+        width_css: f64,
+        height_css: f64,
+        density: f64,
+    ) -> Result<(), JsValue> {
+        self.width_css = width_css;
+        let view = Viewport::new(width_css, height_css, density);
+        paint(canvas, &self.scene.picture, &view, &self.settings.theme).map_err(thrown)
+    }
+
+    /// Everything about the body at the chosen moment.
+    pub fn circumstances(&self) -> Result<JsValue, JsValue> {
+        write(&self.scene.now)
+    }
+
+    /// The chosen date and, where the visitor or the page gave one, the place.
+    pub fn choices(&self) -> Result<JsValue, JsValue> {
+        let place = match &self.settings.spot {
+            Spot::Exact(place) => Some(format!(
+                "{},{}",
+                place.latitude_deg(),
+                place.longitude_deg()
+            )),
+            _ => None,
+        };
+        write(&Choices {
+            date: self.iso_date(),
+            place,
+        })
+    }
+
+    /// Labels, colours and the like: what changes with the settings but not with the date.
+    pub fn furniture(&self) -> Object {
+        words::furniture(&self.settings, &self.host)
+    }
+
+    /// Words and slider positions for the chosen date.
+    pub fn state(&self) -> Result<JsValue, JsValue> {
+        let words = words::tell(&self.settings, &self.host, &self.scene, self.horizon_up);
+        write(&State {
+            date: self.iso_date(),
+            day: self.settings.day,
+            first_day: self.frame.0,
+            last_day: self.frame.1,
+            horizon_up: self.horizon_up,
+            words,
+        })
+    }
+
+    /// The picture's numbers: `{ caption, head, rows, marked }`, `marked` being the chosen row.
+    pub fn table(&self) -> Result<JsValue, JsValue> {
+        #[derive(Serialize)]
+        struct Marked {
+            #[serde(flatten)]
+            table: Table,
+            marked: Option<usize>,
+        }
+        let table = self.scene.table(&self.host);
+        let chosen = words::chosen_remark();
+        let marked = table
+            .rows
+            .iter()
+            .position(|row| row.last().is_some_and(|remark| remark == chosen));
+        write(&Marked { table, marked })
+    }
+
+    /// Moves to the date under a pointer, `x_css` from the left edge of the canvas.
+    pub fn choose_at(&mut self, x_css: f64) -> Result<bool, JsValue> {
+        let view = Viewport::new(self.width_css, 0.0, 1.0);
+        match self.scene.picture.date_at(x_css, &view) {
+            Some(utc) => self.move_to(self.host.day_of(utc).clamp(self.frame.0, self.frame.1)),
+            None => Ok(false),
+        }
+    }
+
+    /// Whether a key moves the date.
+    pub fn knows_key(&self, key: &str) -> bool {
+        self.target_of(key).is_some()
+    }
+
+    /// Moves as a key asks: arrows a day, Page keys a week, Home and End to the ends of the frame.
+    pub fn press(&mut self, key: &str) -> Result<bool, JsValue> {
+        match self.target_of(key) {
+            Some(day) => self.move_to(day.clamp(self.frame.0, self.frame.1)),
+            None => Ok(false),
+        }
+    }
+
+    /// Moves to a position of the slider.
+    pub fn choose_day(&mut self, day: f64) -> Result<bool, JsValue> {
+        if !day.is_finite() {
+            return Ok(false);
+        }
+        self.move_to((day as Day).clamp(self.frame.0, self.frame.1))
+    }
+
+    /// Moves to the visitor's own date.
+    pub fn choose_today(&mut self) -> Result<bool, JsValue> {
+        self.move_to(self.host.today())
+    }
+
+    /// Moves to a typed date; answers `{ changed, message }`.
+    pub fn choose_date(&mut self, date: &str) -> Result<JsValue, JsValue> {
+        match read_date(date, &self.host) {
+            Ok(day) => write(&Taken {
+                changed: self.move_to(day)?,
+                message: None,
+            }),
+            Err(error) => write(&Taken {
+                changed: false,
+                message: Some(error.message().to_owned()),
+            }),
+        }
+    }
+
+    /// Takes a typed place; answers `{ changed, message }`.
+    pub fn choose_place(&mut self, latitude: &str, longitude: &str) -> Result<JsValue, JsValue> {
+        let typed = || {
+            let latitude_deg = place::parse_coordinate(latitude, Coordinate::Latitude)?;
+            let longitude_deg = place::parse_coordinate(longitude, Coordinate::Longitude)?;
+            Place::new(latitude_deg, longitude_deg, 0.0)
+        };
+        match typed() {
+            Ok(place) => {
+                self.settings.spot = Spot::Exact(place);
+                self.rebuild()?;
+                write(&Taken {
+                    changed: true,
+                    message: None,
+                })
+            }
+            Err(error) => write(&Taken {
+                changed: false,
+                message: Some(error.message().to_owned()),
+            }),
+        }
+    }
+
+    /// Shows the disc with the horizon, or else the celestial pole, up.
+    pub fn turn_disc(&mut self, horizon_up: bool) -> Result<(), JsValue> {
+        self.horizon_up =
+            horizon_up && self.settings.view == View::Disc && self.settings.spot.place().is_some();
+        self.rebuild()
+    }
+}
+
+impl Exhibit {
+    fn build(attributes: &Attributes) -> Result<(Self, Vec<Problem>), Error> {
+        let (host, mut problems) = Self::host(attributes)?;
+        let (settings, more) = Settings::read(attributes, &host);
+        problems.extend(more);
+        let frame = frame_around(settings.day, settings.span_days);
+        let scene = Scene::build(&settings, &host, frame, false)?;
+        Ok((
+            Self {
+                host,
+                settings,
+                frame,
+                scene,
+                horizon_up: false,
+                width_css: 0.0,
+            },
+            problems,
+        ))
+    }
+
+    /// A host with the zone and language asked for, or with the browser's where they cannot be used.
+    fn host(attributes: &Attributes) -> Result<(Host, Vec<Problem>), Error> {
+        let lang = attributes.text("lang").unwrap_or_else(|| "en".to_owned());
+        let mut problems = Vec::new();
+        let zone = attributes.text("zone");
+        let zone = zone.as_deref().filter(|zone| {
+            let outcome = Host::new("en", Some(zone));
+            problems.extend(
+                outcome
+                    .as_ref()
+                    .err()
+                    .map(|error| Problem::new("zone", error)),
+            );
+            outcome.is_ok()
+        });
+        let host = Host::new(&lang, zone).or_else(|error| {
+            problems.push(Problem::new("lang", &error));
+            Host::new("en", zone)
+        });
+        host.map(|host| (host, problems))
+    }
+
+    fn target_of(&self, key: &str) -> Option<Day> {
+        let day = self.settings.day;
+        Some(match key {
+            "ArrowRight" | "ArrowUp" => day + 1,
+            "ArrowLeft" | "ArrowDown" => day - 1,
+            "PageUp" => day + PAGE_DAYS,
+            "PageDown" => day - PAGE_DAYS,
+            "Home" => self.frame.0,
+            "End" => self.frame.1,
+            _ => return None,
+        })
+    }
+
+    /// Chooses a day; one outside the frame takes the frame along. Answers whether anything moved.
+    fn move_to(&mut self, day: Day) -> Result<bool, JsValue> {
+        if day == self.settings.day {
+            return Ok(false);
+        }
+        self.settings.day = day;
+        if (self.frame.0..=self.frame.1).contains(&day) {
+            self.scene
+                .set_day(&self.settings, &self.host, self.horizon_up)
+                .map_err(thrown)?;
+        } else {
+            self.frame = frame_around(day, self.settings.span_days);
+            self.rebuild()?;
+        }
+        Ok(true)
+    }
+
+    fn rebuild(&mut self) -> Result<(), JsValue> {
+        self.scene = Scene::build(&self.settings, &self.host, self.frame, self.horizon_up)
+            .map_err(thrown)?;
+        Ok(())
+    }
+
+    fn iso_date(&self) -> String {
+        // Noon of the count's own day: its date in UTC is the calendar date of the zone.
+        let utc = crate::Utc::from_days_since_j2000(self.settings.day as f64);
+        utc.to_rfc3339()
+            .chars()
+            .take_while(|&letter| letter != 'T')
+            .collect()
+    }
+}
+
+/// The frame of a span with a day in its middle, held within the years that the series cover.
+fn frame_around(day: Day, span_days: i64) -> (Day, Day) {
+    let first = (day - span_days / 2)
+        .min(last_day() - span_days)
+        .max(first_day());
+    (first, first + span_days)
+}

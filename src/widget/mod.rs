@@ -1,0 +1,12 @@
+//! The page's side, compiled for WebAssembly only: exported functions, the element's state, its canvas.
+//!
+//! This is the only place that knows wasm-bindgen, web-sys and js-sys, and the only one that reads a clock,
+//! a zone or a language.
+
+mod canvas;
+pub mod exhibit;
+mod host;
+pub mod module;
+mod scene;
+mod settings;
+mod words;

@@ -1,0 +1,307 @@
+//! The element's attributes as the exhibit uses them. A bad value leaves the default and becomes a problem to show.
+
+use js_sys::Reflect;
+use serde::Serialize;
+use wasm_bindgen::JsValue;
+
+use super::host::{Day, Host};
+use crate::chart::{Colour, Theme};
+use crate::error::{Code, Error};
+use crate::explain::Units;
+use crate::place::{self, Place};
+use crate::time::Utc;
+use crate::{Body, series};
+
+/// Attributes as the page gives them: a plain object of texts, absent ones null, with `prefersDark` and `colours`.
+pub(super) struct Attributes(JsValue);
+
+impl Attributes {
+    pub(super) fn new(attributes: JsValue) -> Self {
+        Self(attributes)
+    }
+
+    /// The text of one attribute, trimmed; `None` where there is none.
+    pub(super) fn text(&self, name: &str) -> Option<String> {
+        let text = get(&self.0, name).as_string()?;
+        Some(text.trim().to_owned()).filter(|text| !text.is_empty())
+    }
+
+    fn prefers_dark(&self) -> bool {
+        get(&self.0, "prefersDark").is_truthy()
+    }
+
+    /// A custom property of the form `#rrggbb`; other forms leave the theme's own colour.
+    fn colour(&self, name: &str) -> Option<Colour> {
+        let text = get(&get(&self.0, "colours"), name).as_string()?;
+        let digits = text.strip_prefix('#').filter(|digits| digits.len() == 6)?;
+        let channel = |at: usize| u8::from_str_radix(digits.get(at..at + 2)?, 16).ok();
+        Some(Colour(channel(0)?, channel(2)?, channel(4)?))
+    }
+}
+
+fn get(object: &JsValue, key: &str) -> JsValue {
+    Reflect::get(object, &key.into()).unwrap_or(JsValue::UNDEFINED)
+}
+
+/// One attribute that could not be used.
+#[derive(Debug, Serialize)]
+pub(super) struct Problem {
+    attribute: &'static str,
+    code: &'static str,
+    message: String,
+}
+
+impl Problem {
+    pub(super) fn new(attribute: &'static str, error: &Error) -> Self {
+        Self {
+            attribute,
+            code: error.code().as_str(),
+            message: error.message().to_owned(),
+        }
+    }
+}
+
+/// The pictures an element can show.
+#[derive(Debug, Clone, Copy, PartialEq, Eq)]
+pub(super) enum View {
+    /// Lit share, size, lit area and brightness against the date.
+    Tradeoff,
+    /// The disc to scale through the days.
+    Disc,
+}
+
+impl View {
+    pub(super) const fn name(self) -> &'static str {
+        match self {
+            View::Tradeoff => "tradeoff",
+            View::Disc => "disc",
+        }
+    }
+}
+
+/// The place in use and where it came from.
+#[derive(Debug, Clone, PartialEq)]
+pub(super) enum Spot {
+    /// Nobody gave a place and the zone names none.
+    Unknown,
+    /// The principal city of the browser's time zone.
+    Rough {
+        /// Where that city lies.
+        place: Place,
+        /// Its name, from the zone's.
+        city: String,
+    },
+    /// Written by the page or typed by the visitor.
+    Exact(Place),
+}
+
+impl Spot {
+    pub(super) fn place(&self) -> Option<&Place> {
+        match self {
+            Spot::Unknown => None,
+            Spot::Rough { place, .. } | Spot::Exact(place) => Some(place),
+        }
+    }
+}
+
+/// The attributes after reading, defaults filled in.
+#[derive(Debug)]
+pub(super) struct Settings {
+    pub(super) body: Body,
+    pub(super) view: View,
+    pub(super) day: Day,
+    pub(super) span_days: i64,
+    pub(super) spot: Spot,
+    pub(super) theme: Theme,
+    pub(super) units: Units,
+}
+
+const SPAN_DAYS: std::ops::RangeInclusive<i64> = 8..=3000;
+
+impl Settings {
+    /// Reads all attributes; each that cannot be used is replaced by its default and reported.
+    pub(super) fn read(attributes: &Attributes, host: &Host) -> (Self, Vec<Problem>) {
+        let mut problems = Vec::new();
+        let mut note = |attribute, error: Error| problems.push(Problem::new(attribute, &error));
+        let text = |name| attributes.text(name);
+        let body = pick(text("body"), Body::Venus, read_body, |error| {
+            note("body", error)
+        });
+        let settings = Self {
+            body,
+            view: pick(text("view"), View::Tradeoff, read_view, |error| {
+                note("view", error)
+            }),
+            day: pick(
+                text("date"),
+                host.today(),
+                |text| read_date(text, host),
+                |error| note("date", error),
+            ),
+            span_days: pick(text("span"), default_span_days(body), read_span, |error| {
+                note("span", error)
+            }),
+            spot: pick(
+                text("place"),
+                rough_spot(host.zone()),
+                |text| read_spot(text, host.zone()),
+                |error| note("place", error),
+            ),
+            theme: read_theme(attributes, |error| note("theme", error)),
+            units: pick(text("units"), Units::Metric, read_units, |error| {
+                note("units", error)
+            }),
+        };
+        (settings, problems)
+    }
+}
+
+/// The value that a text gives, or the default where there is none or it cannot be used.
+fn pick<T>(
+    text: Option<String>,
+    default: T,
+    read: impl FnOnce(&str) -> Result<T, Error>,
+    note: impl FnOnce(Error),
+) -> T {
+    match text {
+        None => default,
+        Some(text) => read(&text).unwrap_or_else(|error| {
+            note(error);
+            default
+        }),
+    }
+}
+
+fn read_body(text: &str) -> Result<Body, Error> {
+    match text.parse()? {
+        Body::Sun => Err(Error::new(
+            Code::BadOption,
+            "The Sun shows no phase to draw; choose the Moon or a planet from mercury to neptune.",
+        )),
+        body => Ok(body),
+    }
+}
+
+fn read_view(text: &str) -> Result<View, Error> {
+    [View::Tradeoff, View::Disc]
+        .into_iter()
+        .find(|view| view.name() == text)
+        .ok_or_else(|| not_among("view", text, "tradeoff, disc"))
+}
+
+fn read_units(text: &str) -> Result<Units, Error> {
+    match text {
+        "metric" => Ok(Units::Metric),
+        "imperial" => Ok(Units::Imperial),
+        _ => Err(not_among("set of units", text, "metric, imperial")),
+    }
+}
+
+fn not_among(what: &str, text: &str, known: &str) -> Error {
+    let shown: String = text.chars().take(40).collect();
+    Error::new(
+        Code::BadOption,
+        format!("There is no {what} \"{shown}\" here; choose one of {known}."),
+    )
+}
+
+/// A calendar date within the series' span, or `today`.
+pub(super) fn read_date(text: &str, host: &Host) -> Result<Day, Error> {
+    if text == "today" {
+        return Ok(host.today());
+    }
+    let utc = Utc::parse(text)?;
+    let day = match text.len() {
+        // A plain date is the reader's own calendar date, not an instant in Greenwich.
+        0..=10 => (utc.days_since_j2000() + 0.5).floor() as Day,
+        _ => host.day_of(utc),
+    };
+    if day < first_day() || day > last_day() {
+        return Err(Error::new(
+            Code::OutOfSpan,
+            format!(
+                "{text} lies outside the years {} to {} for which places are computed.",
+                series::VALID_FROM_YEAR,
+                series::VALID_TO_YEAR
+            ),
+        ));
+    }
+    Ok(day)
+}
+
+/// First day that a frame may show: one day inside the series' span, whatever the zone.
+pub(super) fn first_day() -> Day {
+    (f64::from(series::VALID_FROM_YEAR - 2000) * 365.2425).ceil() as Day + 2
+}
+
+/// Last day that a frame may show.
+pub(super) fn last_day() -> Day {
+    (f64::from(series::VALID_TO_YEAR - 2000) * 365.2425).floor() as Day - 2
+}
+
+fn read_span(text: &str) -> Result<i64, Error> {
+    text.parse()
+        .ok()
+        .filter(|days| SPAN_DAYS.contains(days))
+        .ok_or_else(|| {
+            let (least, most) = (SPAN_DAYS.start(), SPAN_DAYS.end());
+            Error::new(
+                Code::BadStep,
+                format!("The span is a whole number of days from {least} to {most}."),
+            )
+        })
+}
+
+/// Long enough to show how a round of phases rises and falls, short enough to read a day.
+const fn default_span_days(body: Body) -> i64 {
+    match body {
+        Body::Moon => 34,
+        Body::Mercury => 130,
+        Body::Venus => 330,
+        Body::Mars => 460,
+        _ => 400,
+    }
+}
+
+fn rough_spot(zone: &str) -> Spot {
+    place::rough_place(zone)
+        .and_then(|rough| {
+            let place = Place::new(rough.latitude_deg, rough.longitude_deg, 0.0).ok()?;
+            Some(Spot::Rough {
+                place,
+                city: rough.city,
+            })
+        })
+        .unwrap_or(Spot::Unknown)
+}
+
+fn read_spot(text: &str, zone: &str) -> Result<Spot, Error> {
+    match text {
+        "auto" => Ok(rough_spot(zone)),
+        _ => Ok(Spot::Exact(place::parse_pair(text)?)),
+    }
+}
+
+fn read_theme(attributes: &Attributes, note: impl FnOnce(Error)) -> Theme {
+    let automatic = || {
+        if attributes.prefers_dark() {
+            Theme::dark()
+        } else {
+            Theme::light()
+        }
+    };
+    let read = |text: &str| match text {
+        "light" => Ok(Theme::light()),
+        "dark" => Ok(Theme::dark()),
+        "night" => Ok(Theme::night()),
+        "auto" => Ok(automatic()),
+        _ => Err(not_among("theme", text, "light, dark, night, auto")),
+    };
+    let theme = pick(attributes.text("theme"), automatic(), read, note);
+    Theme {
+        background: attributes.colour("paper").unwrap_or(theme.background),
+        ink: attributes.colour("ink").unwrap_or(theme.ink),
+        chosen: attributes.colour("accent").unwrap_or(theme.chosen),
+        ..theme
+    }
+}

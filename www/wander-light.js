@@ -1,0 +1,368 @@
+// The custom element <wander-light>: what a page needs around the module and Rust cannot be.
+//
+// It holds attributes, loads the module once per page, hands events to the Rust `Exhibit` and puts the
+// exhibit's words and picture into its shadow tree. It computes nothing about the sky and owns no wording
+// except the two sentences for the case that the module never arrives.
+
+import init, { Exhibit } from "./wanderlight.js";
+import { styles, template } from "./wander-light-shadow.js";
+
+const TAG = "wander-light";
+const SETTINGS = ["body", "view", "date", "span", "place", "zone", "lang", "theme", "units", "group", "label-overrides"];
+const LOADING_FAILED = "The chart could not be loaded, so this page shows its plain text instead.";
+const NO_WASM = "This browser does not run WebAssembly, so this page shows its plain text instead of the chart.";
+/** Start loading when the element comes within this distance of the viewport. */
+const NEAR_VIEWPORT = "600px";
+
+const groups = new Map();
+let loading;
+
+/** One module instance per page; a failed attempt may be repeated by the next element that asks. */
+function loadModule() {
+  if (typeof WebAssembly !== "object") return Promise.reject(new Error(NO_WASM));
+  // The one-file page carries the module's bytes inside itself.
+  const inline = document.getElementById("wanderlight-wasm");
+  const source = inline ? Uint8Array.from(atob(inline.textContent.trim()), (c) => c.charCodeAt(0)) : undefined;
+  loading ??= init(source && { module_or_path: source }).catch((cause) => {
+    loading = undefined;
+    throw new Error(LOADING_FAILED, { cause });
+  });
+  return loading;
+}
+
+const camelCase = (name) => name.replace(/-(.)/g, (_, letter) => letter.toUpperCase());
+
+class WanderLight extends HTMLElement {
+  static observedAttributes = SETTINGS;
+
+  #exhibit;
+  #parts;
+  #group;
+  #cleanup;
+  #frame = 0;
+  #resume = {};
+  #reported = new Set();
+  #sheet = "";
+
+  connectedCallback() {
+    for (const name of SETTINGS.map(camelCase)) this.#adoptEarlyProperty(name);
+    if (!this.#parts) this.#buildShadow();
+    this.#cleanup = new AbortController();
+    const near = new IntersectionObserver((entries) => {
+      if (!entries.some((entry) => entry.isIntersecting)) return;
+      near.disconnect();
+      this.#start();
+    }, { rootMargin: NEAR_VIEWPORT });
+    near.observe(this);
+    this.#cleanup.signal.addEventListener("abort", () => near.disconnect());
+  }
+
+  disconnectedCallback() {
+    this.#cleanup?.abort();
+    cancelAnimationFrame(this.#frame);
+    this.#frame = 0;
+    this.#leaveGroup();
+    // What the visitor chose is kept for the case that the element was only moved.
+    if (this.#exhibit) this.#resume = this.#exhibit.choices();
+    this.#exhibit?.free();
+    this.#exhibit = undefined;
+  }
+
+  attributeChangedCallback(name, before, after) {
+    if (before === after) return;
+    if (name === "date" || name === "place") delete this.#resume[name];
+    if (this.#exhibit) this.#guard(() => this.#configure());
+  }
+
+  /** Everything about the body at the chosen moment, as the module's `circumstances` gives it; null before the start. */
+  get circumstances() {
+    return this.#exhibit ? this.#exhibit.circumstances() : null;
+  }
+
+  /** Choose a calendar date (yyyy-mm-dd) as a script; like every script setting it fires no change event. */
+  get date() {
+    return this.#exhibit ? this.#exhibit.choices().date : this.getAttribute("date") ?? "today";
+  }
+  set date(value) {
+    delete this.#resume.date;
+    // A second setting of the same text must still move a date that was dragged away.
+    if (this.getAttribute("date") === String(value)) this.attributeChangedCallback("date", null, value);
+    else this.setAttribute("date", value);
+  }
+
+  #adoptEarlyProperty(name) {
+    if (!Object.hasOwn(this, name)) return;
+    const value = this[name];
+    delete this[name];
+    this[name] = value;
+  }
+
+  #buildShadow() {
+    const root = this.shadowRoot ?? this.attachShadow({ mode: "open" });
+    root.innerHTML = `<style>${styles}</style>${template}`;
+    this.#parts = Object.fromEntries([...root.querySelectorAll("[id]")].map((node) => [node.id, node]));
+  }
+
+  async #start() {
+    const { signal } = this.#cleanup;
+    try {
+      await loadModule();
+    } catch (error) {
+      if (!signal.aborted) this.#giveUp("not-loaded", error.message);
+      return;
+    }
+    if (signal.aborted) return;
+    this.#guard(() => {
+      this.#exhibit = new Exhibit();
+      this.#configure();
+      this.#listen(signal);
+      this.#draw();
+      this.#parts.figure.dataset.state = "ready";
+      this.#fire("wanderlight-ready", this.#exhibit.circumstances());
+    });
+  }
+
+  #configure() {
+    const settings = Object.fromEntries(SETTINGS.map((name) => [camelCase(name), this.getAttribute(name)]));
+    settings.lang ??= this.closest("[lang]")?.lang ?? navigator.language;
+    settings.prefersDark = matchMedia("(prefers-color-scheme: dark)").matches;
+    const look = getComputedStyle(this);
+    settings.colours = Object.fromEntries(
+      ["paper", "ink", "accent"].map((name) => [name, look.getPropertyValue(`--wanderlight-${name}`).trim()]),
+    );
+    const problems = this.#exhibit.configure({ ...settings, ...this.#resume });
+    this.#parts.notice.textContent = problems.map((problem) => problem.message).join(" ");
+    this.#parts.notice.hidden = problems.length === 0;
+    for (const problem of problems) {
+      const key = `${problem.attribute}\n${problem.message}`;
+      if (!this.#reported.has(key)) this.#fire("wanderlight-error", problem);
+      this.#reported.add(key);
+    }
+    this.#joinGroup();
+    this.#showFurniture();
+    this.#show();
+  }
+
+  /** The parts that change with settings but not with the date. */
+  #showFurniture() {
+    const { labels, palette, view, hasPlace } = this.#exhibit.furniture();
+    const p = this.#parts;
+    const sheet = Object.entries(palette).map(([name, colour]) => `--${name}:${colour}`).join(";");
+    if (sheet !== this.#sheet) p.figure.style.cssText = this.#sheet = sheet;
+    for (const [id, text] of Object.entries(labels)) if (p[id]) p[id].textContent = text;
+    p.up.hidden = view !== "disc" || !hasPlace;
+  }
+
+  /** The parts that change with the date. */
+  #show() {
+    const state = this.#exhibit.state();
+    const p = this.#parts;
+    p.slider.min = state.firstDay;
+    p.slider.max = state.lastDay;
+    p.slider.value = state.day;
+    p.slider.setAttribute("aria-valuetext", state.announcement);
+    if (p.picker.value !== state.date) p.picker.value = state.date;
+    p.canvas.setAttribute("aria-label", state.description);
+    p.sentence.textContent = state.sentence;
+    p.placeline.textContent = state.place;
+    p.caution.textContent = state.caution;
+    p.caution.hidden = !state.caution;
+    p.horizonup.checked = state.horizonUp;
+    if (p.numbers.open) this.#fillTable();
+    this.#requestDraw();
+  }
+
+  #fillTable() {
+    const { caption, head, rows, marked } = this.#exhibit.table();
+    const cell = (tag, text, scope) => Object.assign(document.createElement(tag), { textContent: text, ...(scope && { scope }) });
+    const row = (cells) => {
+      const line = document.createElement("tr");
+      line.append(...cells);
+      return line;
+    };
+    this.#parts.caption.textContent = caption;
+    this.#parts.head.replaceChildren(row(head.map((text) => cell("th", text, "col"))));
+    this.#parts.rows.replaceChildren(
+      ...rows.map(([first, ...rest], index) => {
+        const line = row([cell("th", first, "row"), ...rest.map((text) => cell("td", text))]);
+        if (index === marked) line.setAttribute("aria-current", "date");
+        return line;
+      }),
+    );
+  }
+
+  #requestDraw() {
+    this.#frame ||= requestAnimationFrame(() => {
+      this.#frame = 0;
+      this.#guard(() => this.#draw());
+    });
+  }
+
+  #draw() {
+    const { stage, canvas } = this.#parts;
+    const { width, height } = stage.getBoundingClientRect();
+    if (width >= 1 && height >= 1) this.#exhibit.draw(canvas, width, height, devicePixelRatio);
+  }
+
+  #listen(signal) {
+    const p = this.#parts;
+    const on = (target, type, handler) => target.addEventListener(type, (event) => this.#guard(() => handler(event)), { signal });
+
+    on(p.stage, "pointerdown", (event) => {
+      if (event.button !== 0) return;
+      p.stage.setPointerCapture(event.pointerId);
+      // The slider is the keyboard twin of the drag, so arrow keys go on from where the finger stopped.
+      p.slider.focus({ preventScroll: true });
+      event.preventDefault();
+      this.#drag(event);
+    });
+    on(p.stage, "pointermove", (event) => {
+      if (p.stage.hasPointerCapture(event.pointerId)) this.#drag(event);
+    });
+    on(p.slider, "keydown", (event) => {
+      if (event.altKey || event.ctrlKey || event.metaKey) return;
+      const known = this.#exhibit.knows_key(event.key);
+      if (!known) return;
+      event.preventDefault();
+      this.#moved(this.#exhibit.press(event.key));
+    });
+    on(p.slider, "input", () => this.#moved(this.#exhibit.choose_day(p.slider.valueAsNumber)));
+    on(p.picker, "change", () => this.#typed(this.#exhibit.choose_date(p.picker.value)));
+    on(p.today, "click", () => this.#moved(this.#exhibit.choose_today()));
+    on(p.horizonup, "change", () => {
+      this.#exhibit.turn_disc(p.horizonup.checked);
+      this.#show();
+    });
+    on(p.numbers, "toggle", () => p.numbers.open && this.#fillTable());
+    on(p.placeform, "submit", (event) => {
+      event.preventDefault();
+      this.#placed(this.#exhibit.choose_place(p.latitude.value, p.longitude.value));
+    });
+    on(p.locate, "click", () => this.#locate());
+    on(p.canvas, "contextrestored", () => this.#requestDraw());
+
+    const resize = new ResizeObserver(() => this.#requestDraw());
+    resize.observe(p.stage);
+    signal.addEventListener("abort", () => resize.disconnect());
+    on(matchMedia("(prefers-color-scheme: dark)"), "change", () => this.#configure());
+    this.#watchDensity(signal);
+  }
+
+  /** A media query holds for one density only, so it is renewed at each change. */
+  #watchDensity(signal) {
+    matchMedia(`(resolution: ${devicePixelRatio}dppx)`).addEventListener("change", () => {
+      if (signal.aborted) return;
+      this.#requestDraw();
+      this.#watchDensity(signal);
+    }, { once: true, signal });
+  }
+
+  #drag(event) {
+    const left = this.#parts.stage.getBoundingClientRect().left;
+    this.#moved(this.#exhibit.choose_at(event.clientX - left));
+  }
+
+  /** The visitor moved the date: show it, tell the page, take the group along. */
+  #moved(changed) {
+    if (!changed) return;
+    this.#resume.date = this.#exhibit.choices().date;
+    this.#show();
+    this.#fire("wanderlight-change", this.#exhibit.circumstances());
+    for (const other of groups.get(this.#group) ?? []) if (other !== this) other.#follow(this.#resume.date);
+  }
+
+  #follow(date) {
+    this.#guard(() => {
+      if (!this.#exhibit.choose_date(date).changed) return;
+      this.#resume.date = date;
+      this.#show();
+      this.#fire("wanderlight-change", this.#exhibit.circumstances());
+    });
+  }
+
+  /** A typed date: a refusal is said beside the field, and what was typed stays there. */
+  #typed({ changed, message }) {
+    this.#parts.pickernote.textContent = message ?? "";
+    this.#moved(changed);
+  }
+
+  #placed({ changed, message }) {
+    this.#parts.placenote.textContent = message ?? "";
+    if (!changed) return;
+    this.#resume.place = this.#exhibit.choices().place;
+    this.#showFurniture();
+    this.#show();
+    this.#fire("wanderlight-change", this.#exhibit.circumstances());
+  }
+
+  #locate() {
+    const refuse = () => this.#guard(() => (this.#parts.placenote.textContent = this.#exhibit.furniture().locateRefused));
+    if (!navigator.geolocation) return refuse();
+    navigator.geolocation.getCurrentPosition(({ coords }) => {
+      if (!this.#exhibit) return;
+      // One decimal (about 10 km) is all the chart needs, so no more is kept.
+      this.#parts.latitude.value = coords.latitude.toFixed(1);
+      this.#parts.longitude.value = coords.longitude.toFixed(1);
+      this.#guard(() => this.#placed(this.#exhibit.choose_place(this.#parts.latitude.value, this.#parts.longitude.value)));
+    }, refuse, { maximumAge: 3_600_000, timeout: 15_000 });
+  }
+
+  #joinGroup() {
+    const name = this.getAttribute("group") || undefined;
+    if (name === this.#group) return;
+    this.#leaveGroup();
+    this.#group = name;
+    if (name) groups.set(name, (groups.get(name) ?? new Set()).add(this));
+  }
+
+  #leaveGroup() {
+    const members = groups.get(this.#group);
+    members?.delete(this);
+    if (members?.size === 0) groups.delete(this.#group);
+    this.#group = undefined;
+  }
+
+  /** Runs one call into the module; whatever goes wrong there stays inside this element. */
+  #guard(action) {
+    if (!this.#exhibit && this.#parts.figure.dataset.state === "ready") return;
+    try {
+      action();
+    } catch (error) {
+      this.#giveUp(error.code ?? "broken", error.code ? error.message : LOADING_FAILED, error);
+    }
+  }
+
+  #giveUp(code, message, cause) {
+    this.#cleanup.abort();
+    this.#leaveGroup();
+    this.#exhibit = undefined;
+    this.#parts.figure.dataset.state = "failed";
+    this.#parts.notice.textContent = message;
+    this.#parts.notice.hidden = false;
+    this.#fire("wanderlight-error", { code, message, cause });
+  }
+
+  #fire(type, detail) {
+    this.dispatchEvent(new CustomEvent(type, { detail, bubbles: true, composed: true }));
+  }
+}
+
+for (const name of SETTINGS) {
+  const property = camelCase(name);
+  // `date` has accessors of its own; `lang` is every element's own property.
+  if (property in WanderLight.prototype) continue;
+  Object.defineProperty(WanderLight.prototype, property, {
+    configurable: true,
+    enumerable: true,
+    get() {
+      return this.getAttribute(name);
+    },
+    set(value) {
+      if (value == null) this.removeAttribute(name);
+      else this.setAttribute(name, value);
+    },
+  });
+}
+
+// A page that includes the script twice, or a second copy of it, keeps the first.
+if (!customElements.get(TAG)) customElements.define(TAG, WanderLight);
