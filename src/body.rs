@@ -1,6 +1,6 @@
 //! The bodies that the ephemeris knows.
 
-use crate::error::{Code, Error};
+use crate::error::{Code, Error, quoted};
 use std::{fmt, str::FromStr};
 
 /// Sun, Moon and the planets except the Earth, by the names the module uses.
@@ -91,16 +91,11 @@ impl FromStr for Body {
                 Error::new(
                     Code::UnknownBody,
                     format!(
-                        "There is no body \"{}\" here; choose one of {}.",
-                        shown(wanted),
+                        "There is no body {} here; choose one of {}.",
+                        quoted(wanted),
                         known.join(", ")
                     ),
                 )
             })
     }
-}
-
-/// What was typed, cut so that a pasted page does not become the message.
-fn shown(text: &str) -> String {
-    text.chars().take(40).collect()
 }

@@ -74,3 +74,11 @@ impl fmt::Display for Error {
 }
 
 impl std::error::Error for Error {}
+
+/// What was typed, in quotes, cut so that a pasted page does not become the message.
+pub(crate) fn quoted(text: &str) -> String {
+    let mut shown: String = text.trim().chars().take(40).collect();
+    shown.insert(0, '"');
+    shown.push('"');
+    shown
+}

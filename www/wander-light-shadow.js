@@ -73,12 +73,16 @@ button, input:not([type="range"], [type="checkbox"]) {
 button { cursor: pointer; }
 button:hover { border-color: var(--accent, Highlight); }
 :focus-visible { outline: 2px solid var(--accent, Highlight); outline-offset: 2px; }
-figcaption { min-height: 6rem; }
+/* Room for the longest usual sentences, so that nothing below moves while the date is dragged. */
+figcaption { min-height: 18.5rem; }
+@container (min-width: 400px) { figcaption { min-height: 12.5rem; } }
+@container (min-width: 646px) { figcaption { min-height: 9.5rem; } }
 figcaption p, #notice { margin: 0.5rem 0 0; max-width: 44rem; }
 #placeline, #placehint { color: var(--soft, inherit); }
 #caution, #notice { border-left: 0.25rem solid var(--accent, Highlight); padding-left: 0.6rem; }
 details { margin-top: 0.5rem; }
 summary { min-height: 1.75rem; cursor: pointer; color: var(--soft, inherit); }
+@container (max-width: 500px) { #placelabel { min-height: 3rem; } }
 .scroll { overflow-x: auto; }
 table { border-collapse: collapse; font-size: 0.9rem; font-variant-numeric: tabular-nums; }
 caption { text-align: start; padding: 0.25rem 0; color: var(--soft, inherit); }
@@ -93,3 +97,22 @@ form { display: flex; flex-wrap: wrap; gap: 0.5rem 0.9rem; align-items: center; 
 @media (forced-colors: active) { figure { border-color: CanvasText; } }
 @media print { #controls, details { display: none; } }
 `;
+
+/** Puts the module's table into the shadow tree; `parts` are its nodes by id. */
+export function fillTable(parts, { caption, head, rows, marked }) {
+  const cell = (tag, text, scope) => Object.assign(document.createElement(tag), { textContent: text, ...(scope && { scope }) });
+  const row = (cells) => {
+    const line = document.createElement("tr");
+    line.append(...cells);
+    return line;
+  };
+  parts.caption.textContent = caption;
+  parts.head.replaceChildren(row(head.map((text) => cell("th", text, "col"))));
+  parts.rows.replaceChildren(
+    ...rows.map(([first, ...rest], index) => {
+      const line = row([cell("th", first, "row"), ...rest.map((text) => cell("td", text))]);
+      if (index === marked) line.setAttribute("aria-current", "date");
+      return line;
+    }),
+  );
+}

@@ -1,36 +1,18 @@
 // The custom element <wander-light>: what a page needs around the module and Rust cannot be.
 //
 // It holds attributes, loads the module once per page, hands events to the Rust `Exhibit` and puts the
-// exhibit's words and picture into its shadow tree. It computes nothing about the sky and owns no wording
-// except the two sentences for the case that the module never arrives.
+// exhibit's words and picture into its shadow tree. It computes nothing about the sky and owns no wording.
 
-import init, { Exhibit } from "./wanderlight.js";
-import { styles, template } from "./wander-light-shadow.js";
+import { Exhibit } from "./wanderlight.js";
+import { fillTable, styles, template } from "./wander-light-shadow.js";
+import {
+  brokenMessage, camelCase, companions, devicePosition, joinGroup, leaveGroup, loadModule, onDensityChange, reflectAttributes,
+} from "./wander-light-shared.js";
 
 const TAG = "wander-light";
-const SETTINGS = ["body", "view", "date", "span", "place", "zone", "lang", "theme", "units", "group", "label-overrides"];
-const LOADING_FAILED = "The chart could not be loaded, so this page shows its plain text instead.";
-const NO_WASM = "This browser does not run WebAssembly, so this page shows its plain text instead of the chart.";
+const SETTINGS = ["body", "view", "date", "span", "place", "zone", "lang", "theme", "units", "group"];
 /** Start loading when the element comes within this distance of the viewport. */
 const NEAR_VIEWPORT = "600px";
-
-const groups = new Map();
-let loading;
-
-/** One module instance per page; a failed attempt may be repeated by the next element that asks. */
-function loadModule() {
-  if (typeof WebAssembly !== "object") return Promise.reject(new Error(NO_WASM));
-  // The one-file page carries the module's bytes inside itself.
-  const inline = document.getElementById("wanderlight-wasm");
-  const source = inline ? Uint8Array.from(atob(inline.textContent.trim()), (c) => c.charCodeAt(0)) : undefined;
-  loading ??= init(source && { module_or_path: source }).catch((cause) => {
-    loading = undefined;
-    throw new Error(LOADING_FAILED, { cause });
-  });
-  return loading;
-}
-
-const camelCase = (name) => name.replace(/-(.)/g, (_, letter) => letter.toUpperCase());
 
 class WanderLight extends HTMLElement {
   static observedAttributes = SETTINGS;
@@ -42,11 +24,11 @@ class WanderLight extends HTMLElement {
   #frame = 0;
   #resume = {};
   #reported = new Set();
-  #sheet = "";
 
   connectedCallback() {
     for (const name of SETTINGS.map(camelCase)) this.#adoptEarlyProperty(name);
     if (!this.#parts) this.#buildShadow();
+    this.#joinGroup();
     this.#cleanup = new AbortController();
     const near = new IntersectionObserver((entries) => {
       if (!entries.some((entry) => entry.isIntersecting)) return;
@@ -71,6 +53,7 @@ class WanderLight extends HTMLElement {
   attributeChangedCallback(name, before, after) {
     if (before === after) return;
     if (name === "date" || name === "place") delete this.#resume[name];
+    if (name === "group" && this.isConnected) this.#joinGroup();
     if (this.#exhibit) this.#guard(() => this.#configure());
   }
 
@@ -138,7 +121,6 @@ class WanderLight extends HTMLElement {
       if (!this.#reported.has(key)) this.#fire("wanderlight-error", problem);
       this.#reported.add(key);
     }
-    this.#joinGroup();
     this.#showFurniture();
     this.#show();
   }
@@ -147,8 +129,7 @@ class WanderLight extends HTMLElement {
   #showFurniture() {
     const { labels, palette, view, hasPlace } = this.#exhibit.furniture();
     const p = this.#parts;
-    const sheet = Object.entries(palette).map(([name, colour]) => `--${name}:${colour}`).join(";");
-    if (sheet !== this.#sheet) p.figure.style.cssText = this.#sheet = sheet;
+    for (const [name, colour] of Object.entries(palette)) p.figure.style.setProperty(`--${name}`, colour);
     for (const [id, text] of Object.entries(labels)) if (p[id]) p[id].textContent = text;
     p.up.hidden = view !== "disc" || !hasPlace;
   }
@@ -168,33 +149,14 @@ class WanderLight extends HTMLElement {
     p.caution.textContent = state.caution;
     p.caution.hidden = !state.caution;
     p.horizonup.checked = state.horizonUp;
-    if (p.numbers.open) this.#fillTable();
+    if (p.numbers.open) fillTable(p, this.#exhibit.table());
     this.#requestDraw();
-  }
-
-  #fillTable() {
-    const { caption, head, rows, marked } = this.#exhibit.table();
-    const cell = (tag, text, scope) => Object.assign(document.createElement(tag), { textContent: text, ...(scope && { scope }) });
-    const row = (cells) => {
-      const line = document.createElement("tr");
-      line.append(...cells);
-      return line;
-    };
-    this.#parts.caption.textContent = caption;
-    this.#parts.head.replaceChildren(row(head.map((text) => cell("th", text, "col"))));
-    this.#parts.rows.replaceChildren(
-      ...rows.map(([first, ...rest], index) => {
-        const line = row([cell("th", first, "row"), ...rest.map((text) => cell("td", text))]);
-        if (index === marked) line.setAttribute("aria-current", "date");
-        return line;
-      }),
-    );
   }
 
   #requestDraw() {
     this.#frame ||= requestAnimationFrame(() => {
       this.#frame = 0;
-      this.#guard(() => this.#draw());
+      if (this.#exhibit) this.#guard(() => this.#draw());
     });
   }
 
@@ -221,8 +183,7 @@ class WanderLight extends HTMLElement {
     });
     on(p.slider, "keydown", (event) => {
       if (event.altKey || event.ctrlKey || event.metaKey) return;
-      const known = this.#exhibit.knows_key(event.key);
-      if (!known) return;
+      if (!this.#exhibit.knows_key(event.key)) return;
       event.preventDefault();
       this.#moved(this.#exhibit.press(event.key));
     });
@@ -233,7 +194,7 @@ class WanderLight extends HTMLElement {
       this.#exhibit.turn_disc(p.horizonup.checked);
       this.#show();
     });
-    on(p.numbers, "toggle", () => p.numbers.open && this.#fillTable());
+    on(p.numbers, "toggle", () => p.numbers.open && fillTable(p, this.#exhibit.table()));
     on(p.placeform, "submit", (event) => {
       event.preventDefault();
       this.#placed(this.#exhibit.choose_place(p.latitude.value, p.longitude.value));
@@ -245,21 +206,11 @@ class WanderLight extends HTMLElement {
     resize.observe(p.stage);
     signal.addEventListener("abort", () => resize.disconnect());
     on(matchMedia("(prefers-color-scheme: dark)"), "change", () => this.#configure());
-    this.#watchDensity(signal);
-  }
-
-  /** A media query holds for one density only, so it is renewed at each change. */
-  #watchDensity(signal) {
-    matchMedia(`(resolution: ${devicePixelRatio}dppx)`).addEventListener("change", () => {
-      if (signal.aborted) return;
-      this.#requestDraw();
-      this.#watchDensity(signal);
-    }, { once: true, signal });
+    onDensityChange(() => this.#requestDraw(), signal);
   }
 
   #drag(event) {
-    const left = this.#parts.stage.getBoundingClientRect().left;
-    this.#moved(this.#exhibit.choose_at(event.clientX - left));
+    this.#moved(this.#exhibit.choose_at(event.clientX - this.#parts.stage.getBoundingClientRect().left));
   }
 
   /** The visitor moved the date: show it, tell the page, take the group along. */
@@ -268,13 +219,15 @@ class WanderLight extends HTMLElement {
     this.#resume.date = this.#exhibit.choices().date;
     this.#show();
     this.#fire("wanderlight-change", this.#exhibit.circumstances());
-    for (const other of groups.get(this.#group) ?? []) if (other !== this) other.#follow(this.#resume.date);
+    for (const other of companions(this.#group, this)) other.#follow(this.#resume.date);
   }
 
   #follow(date) {
+    this.#resume.date = date;
+    // One that is not loaded yet begins at this date when it is.
+    if (!this.#exhibit) return;
     this.#guard(() => {
       if (!this.#exhibit.choose_date(date).changed) return;
-      this.#resume.date = date;
       this.#show();
       this.#fire("wanderlight-change", this.#exhibit.circumstances());
     });
@@ -295,16 +248,13 @@ class WanderLight extends HTMLElement {
     this.#fire("wanderlight-change", this.#exhibit.circumstances());
   }
 
-  #locate() {
-    const refuse = () => this.#guard(() => (this.#parts.placenote.textContent = this.#exhibit.furniture().locateRefused));
-    if (!navigator.geolocation) return refuse();
-    navigator.geolocation.getCurrentPosition(({ coords }) => {
-      if (!this.#exhibit) return;
-      // One decimal (about 10 km) is all the chart needs, so no more is kept.
-      this.#parts.latitude.value = coords.latitude.toFixed(1);
-      this.#parts.longitude.value = coords.longitude.toFixed(1);
-      this.#guard(() => this.#placed(this.#exhibit.choose_place(this.#parts.latitude.value, this.#parts.longitude.value)));
-    }, refuse, { maximumAge: 3_600_000, timeout: 15_000 });
+  async #locate() {
+    const position = await devicePosition();
+    if (!this.#exhibit) return;
+    const { latitude, longitude, placenote } = this.#parts;
+    if (!position) return void (placenote.textContent = this.#exhibit.furniture().locateRefused);
+    [latitude.value, longitude.value] = position;
+    this.#guard(() => this.#placed(this.#exhibit.choose_place(...position)));
   }
 
   #joinGroup() {
@@ -312,23 +262,20 @@ class WanderLight extends HTMLElement {
     if (name === this.#group) return;
     this.#leaveGroup();
     this.#group = name;
-    if (name) groups.set(name, (groups.get(name) ?? new Set()).add(this));
+    if (name) joinGroup(name, this);
   }
 
   #leaveGroup() {
-    const members = groups.get(this.#group);
-    members?.delete(this);
-    if (members?.size === 0) groups.delete(this.#group);
+    leaveGroup(this.#group, this);
     this.#group = undefined;
   }
 
-  /** Runs one call into the module; whatever goes wrong there stays inside this element. */
+  /** Runs calls into the module; whatever goes wrong there stays inside this element. */
   #guard(action) {
-    if (!this.#exhibit && this.#parts.figure.dataset.state === "ready") return;
     try {
       action();
     } catch (error) {
-      this.#giveUp(error.code ?? "broken", error.code ? error.message : LOADING_FAILED, error);
+      this.#giveUp(error.code ?? "broken", error.code ? error.message : brokenMessage, error);
     }
   }
 
@@ -347,22 +294,7 @@ class WanderLight extends HTMLElement {
   }
 }
 
-for (const name of SETTINGS) {
-  const property = camelCase(name);
-  // `date` has accessors of its own; `lang` is every element's own property.
-  if (property in WanderLight.prototype) continue;
-  Object.defineProperty(WanderLight.prototype, property, {
-    configurable: true,
-    enumerable: true,
-    get() {
-      return this.getAttribute(name);
-    },
-    set(value) {
-      if (value == null) this.removeAttribute(name);
-      else this.setAttribute(name, value);
-    },
-  });
-}
+reflectAttributes(WanderLight.prototype, SETTINGS);
 
 // A page that includes the script twice, or a second copy of it, keeps the first.
 if (!customElements.get(TAG)) customElements.define(TAG, WanderLight);

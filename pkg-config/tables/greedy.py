@@ -25,7 +25,7 @@ def gram(columns_at, truth: np.ndarray) -> tuple[np.ndarray, np.ndarray]:
     return total / len(truth), products / len(truth)
 
 
-def choose(g, b, mean_square, always, blocks, favour, tolerance, enough=10**6) -> list[int]:
+def choose(g, b, mean_square, always, blocks, favour, tolerance) -> list[int]:
     """Indices of the blocks to keep, in the order chosen.
 
     `always` are columns that belong to the series in any case; `favour(i)` says how many times as welcome the gain of a
@@ -46,12 +46,11 @@ def choose(g, b, mean_square, always, blocks, favour, tolerance, enough=10**6) -
 
     for column in always:
         remaining -= project([column])
-    left = set(range(len(blocks)))
     first = np.array([block[0] for block in blocks])
     last = np.array([block[-1] for block in blocks])
     chosen: list[int] = []
     weight = np.array([favour(i) for i in range(len(blocks))], dtype=float)
-    while remaining > tolerance**2 and left and len(chosen) < enough:
+    while remaining > tolerance**2 and len(chosen) < len(blocks):
         a, c, d = g[first, first], g[first, last], g[last, last]
         single = first == last
         with np.errstate(divide="ignore", invalid="ignore"):
@@ -69,7 +68,6 @@ def choose(g, b, mean_square, always, blocks, favour, tolerance, enough=10**6) -
             break
         remaining -= project(sorted(set(blocks[best])))
         chosen.append(best)
-        left.discard(best)
     return chosen
 
 

@@ -15,13 +15,13 @@ SEED = 20260103
 
 # Around every closest approach to the Earth the sample is dense, since errors look largest there.
 CLOSE_DAYS = np.arange(-16.0, 16.5, 2.0)
-SYNODIC_YEARS = {"mercury": 0.3173, "venus": 1.5987, "mars": 2.1354, "jupiter": 1.0921, "saturn": 1.0352}
+CLOSE_BODIES = ("mercury", "venus", "mars", "jupiter", "saturn")
 
 
 def sample_days(body: str) -> np.ndarray:
     """Instants over 1600-2300, uniform at random, and the neighbourhoods of closest approaches."""
     days = np.random.default_rng(SEED).uniform(-400 * 365.25, 300 * 365.25, INSTANTS)
-    if body not in SYNODIC_YEARS:
+    if body not in CLOSE_BODIES:
         return np.sort(days)
     coarse = np.arange(-400 * 365.25, 300 * 365.25, 4.0)
     apart = kernel.heliocentric_au(body, coarse) - kernel.heliocentric_au("emb", coarse)

@@ -4,8 +4,8 @@ import numpy as np
 
 import greedy
 import kernel
-from basis import CENTRE_MILLENNIA, DELAUNAY, HALF_WIDTH_MILLENNIA, PLANETS
-from series import ARCSEC, Series, Term, angles, read_arguments
+from basis import DELAUNAY
+from series import ARCSEC, Series, Term, angles, instants_millennia, read_arguments, window_part
 
 # Root-mean-square error aimed at per coordinate, arcseconds; the distance counts as an angle at the mean distance.
 TOLERANCE_ARCSEC = 0.2
@@ -20,13 +20,6 @@ SINGLE_GAIN = 1.6
 
 INSTANTS = 24000
 SEED = 20260102
-
-
-def instants_millennia() -> np.ndarray:
-    """Instants over the window, one at random in each of many equal strata, closer together at both ends."""
-    strata = (np.arange(INSTANTS) + np.random.default_rng(SEED).random(INSTANTS)) / INSTANTS
-    u = 2 * strata - 1
-    return CENTRE_MILLENNIA + HALF_WIDTH_MILLENNIA * (0.8 * u + 0.2 * np.sin(np.pi / 2 * u))
 
 
 def mean_longitude_rad(turning: np.ndarray) -> np.ndarray:
@@ -44,10 +37,10 @@ def truth_arcsec(t: np.ndarray) -> list[np.ndarray]:
 
 def fit() -> Series:
     """The quantised series."""
-    t = instants_millennia()
-    x = (t - CENTRE_MILLENNIA) / HALF_WIDTH_MILLENNIA
+    t = instants_millennia(INSTANTS, SEED)
+    x = window_part(t)
     listed = read_arguments("moon_arguments.txt", "moon")
-    series = Series(angle_count=len(DELAUNAY) + len(PLANETS), degrees=DEGREES, single_below=len(DELAUNAY))
+    series = Series(single_below=len(DELAUNAY))
     turning = angles("moon", t)
     phases = np.array([np.array(multiples) @ turning for multiples in listed])
     used: set[int] = set()
@@ -60,8 +53,7 @@ def fit() -> Series:
             ((np.cos,) if coordinate == 2 else (np.sin,)) if alone else (np.cos, np.sin) for alone in single
         ]
 
-        def columns(rows: slice, picks=None) -> np.ndarray:
-            picks = range(len(offered)) if picks is None else picks
+        def columns(rows: slice, picks=range(len(offered))) -> np.ndarray:
             out = [x[rows] ** power for power in range(degree + 1)]
             for i in picks:
                 argument, power = offered[i]

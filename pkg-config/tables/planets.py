@@ -4,8 +4,8 @@ import numpy as np
 
 import greedy
 import kernel
-from basis import CENTRE_MILLENNIA, HALF_WIDTH_MILLENNIA, PLANET_AXES, PLANET_LONGITUDES, PLANET_RATES, PLANETS
-from series import ARCSEC, Series, Term, angles, read_arguments
+from basis import PLANET_AXES, PLANET_LONGITUDES, PLANET_RATES, PLANETS
+from series import ARCSEC, Series, Term, angles, instants_millennia, read_arguments, window_part
 
 # Root-mean-square error aimed at per coordinate, arcseconds, before the factors below.
 TOLERANCE_ARCSEC = 0.13
@@ -28,13 +28,6 @@ INSTANTS = 14000
 SEED = 20260101
 
 
-def instants_millennia() -> np.ndarray:
-    """Instants over the window, one at random in each of many equal strata, closer together at both ends."""
-    strata = (np.arange(INSTANTS) + np.random.default_rng(SEED).random(INSTANTS)) / INSTANTS
-    u = 2 * strata - 1
-    return CENTRE_MILLENNIA + HALF_WIDTH_MILLENNIA * (0.8 * u + 0.2 * np.sin(np.pi / 2 * u))
-
-
 def truth_arcsec(body: str, t: np.ndarray) -> list[np.ndarray]:
     """What the series must give beside the mean motion: longitude, latitude and relative radius."""
     i = PLANETS.index(body)
@@ -46,11 +39,11 @@ def truth_arcsec(body: str, t: np.ndarray) -> list[np.ndarray]:
 
 def fit(body: str) -> Series:
     """The quantised series of one body."""
-    t = instants_millennia()
-    x = (t - CENTRE_MILLENNIA) / HALF_WIDTH_MILLENNIA
+    t = instants_millennia(INSTANTS, SEED)
+    x = window_part(t)
     listed = read_arguments("planet_arguments.txt", body)
     used: set[int] = set()
-    series = Series(angle_count=len(PLANETS), degrees=DEGREES)
+    series = Series()
     turning = angles("planets", t)
     phases = np.array([np.array(multiples) @ turning for multiples in listed])
     for coordinate, truth in enumerate(truth_arcsec(body, t)):

@@ -41,6 +41,18 @@ def angles(kind: str, t: np.ndarray) -> np.ndarray:
     return np.vstack([delaunay, planets])
 
 
+def window_part(t: np.ndarray) -> np.ndarray:
+    """Millennia from J2000 as x, from -1 to 1 over the fit window."""
+    return (t - CENTRE_MILLENNIA) / HALF_WIDTH_MILLENNIA
+
+
+def instants_millennia(count: int, seed: int) -> np.ndarray:
+    """Instants over the window, one at random in each of many equal strata, closer together at both ends."""
+    strata = (np.arange(count) + np.random.default_rng(seed).random(count)) / count
+    u = 2 * strata - 1
+    return CENTRE_MILLENNIA + HALF_WIDTH_MILLENNIA * (0.8 * u + 0.2 * np.sin(np.pi / 2 * u))
+
+
 def varint(value: int) -> bytes:
     """Little-endian base 128 of a whole number not below zero."""
     out = bytearray()
@@ -64,8 +76,6 @@ class Series:
     only a cosine (coordinate 2): the Moon's main problem is symmetric in that way. Zero for the planets.
     """
 
-    angle_count: int
-    degrees: tuple[int, int, int]
     single_below: int = 0
     shifts: list[int] = field(default_factory=list)
     polynomials: list[list[int]] = field(default_factory=list)
@@ -93,7 +103,7 @@ class Series:
 
     def evaluate(self, turning: np.ndarray, t: np.ndarray) -> list[np.ndarray]:
         """The three sums in arcseconds."""
-        x = (t - CENTRE_MILLENNIA) / HALF_WIDTH_MILLENNIA
+        x = window_part(t)
         sums = [
             sum(c * 2.0**-shift * x**k for k, c in enumerate(polynomial))
             for polynomial, shift in zip(self.polynomials, self.shifts)

@@ -38,29 +38,21 @@ pub(super) fn of(
 ) -> Vec<Warning> {
     let mut warnings = Vec::new();
     let mut warn = |code: &'static str, message: String| warnings.push(Warning { code, message });
-    // One decimal is more than any of these uncertainties deserves; whole seconds from 2 on.
-    let clock_seconds = || {
-        let seconds = delta_t_seconds(utc).uncertainty_seconds;
-        if seconds < 2.0 {
-            (seconds * 10.0).ceil() / 10.0
-        } else {
-            seconds.ceil()
-        }
-    };
+    let clock_uncertainty = || seconds_text(delta_t_seconds(utc).uncertainty_seconds);
     match utc.scale() {
         CivilScale::Ut1Before1972 => warn(
             "ut1-before-1972",
             format!(
                 "Before 1972 the time is taken as UT1; delta-T is known to about {} s here.",
-                clock_seconds()
+                clock_uncertainty()
             ),
         ),
         CivilScale::Ut1Future => warn(
             "future-utc",
             format!(
-                "Leap seconds after {LAST_TABLE_YEAR} are unknown: the time is taken as UT1 with a modelled delta-T, \
+                "Leap seconds from {LAST_TABLE_YEAR} on are unknown: the time is taken as UT1 with a modelled delta-T, \
                  uncertain by about {} s here.",
-                clock_seconds()
+                clock_uncertainty()
             ),
         ),
         CivilScale::Utc { .. } => {}
@@ -100,6 +92,18 @@ pub(super) fn of(
     warnings
 }
 
+/// An uncertainty rounded up: tenths below 2 seconds, whole seconds from there on.
+///
+/// Whole numbers only: the formatting of floating point numbers would weigh more than all sentences here.
+fn seconds_text(seconds: f64) -> String {
+    let tenths = (seconds * 10.0).ceil() as u32;
+    if tenths < 20 {
+        format!("{}.{}", tenths / 10, tenths % 10)
+    } else {
+        format!("{}", tenths.div_ceil(10))
+    }
+}
+
 /// The name as it stands in a sentence.
 fn named(body: Body) -> &'static str {
     match body {
@@ -112,5 +116,57 @@ fn named(body: Body) -> &'static str {
         Body::Saturn => "Saturn",
         Body::Uranus => "Uranus",
         Body::Neptune => "Neptune",
+    }
+}
+
+#[cfg(test)]
+mod tests {
+    use super::*;
+
+    #[test]
+    fn uncertainties_are_rounded_up() {
+        assert_eq!(seconds_text(0.05), "0.1");
+        assert_eq!(seconds_text(1.91), "2");
+        assert_eq!(seconds_text(1.9), "1.9");
+        assert_eq!(seconds_text(31.2), "32");
+    }
+
+    fn codes(body: Body, text: &str, place: Option<&crate::Place>) -> Vec<&'static str> {
+        let utc = Utc::parse(text).expect("a valid instant");
+        let answer = crate::circumstances(body, utc, place).expect("within the span");
+        answer.warnings.iter().map(|warning| warning.code).collect()
+    }
+
+    #[test]
+    fn each_warning_comes_when_it_is_due() {
+        let none: [&str; 0] = [];
+        assert_eq!(codes(Body::Venus, "2026-11-24", None), none);
+        assert_eq!(codes(Body::Venus, "1850-01-01", None), ["ut1-before-1972"]);
+        assert_eq!(
+            codes(Body::Venus, "1650-01-01", None),
+            ["ut1-before-1972", "outside-checked-span"]
+        );
+        assert_eq!(codes(Body::Venus, "2150-01-01", None), ["future-utc"]);
+        // New Moon of 2024-04-08 (a total solar eclipse), Mercury's inferior conjunction of 2019-11-11 (a transit).
+        assert_eq!(
+            codes(Body::Moon, "2024-04-08T18:00:00Z", None),
+            ["magnitude-undefined"]
+        );
+        assert_eq!(
+            codes(Body::Mercury, "2019-11-11T15:20:00Z", None),
+            ["magnitude-extrapolated"]
+        );
+    }
+
+    #[test]
+    fn close_to_the_horizon_the_air_is_named() {
+        let greenwich = crate::Place::new(51.48, 0.0, 0.0).expect("a valid place");
+        // The Sun within three degrees above the western horizon, an hour before and after: not.
+        assert_eq!(
+            codes(Body::Sun, "2026-06-21T20:10:00Z", Some(&greenwich)),
+            ["near-horizon"]
+        );
+        assert!(codes(Body::Sun, "2026-06-21T19:10:00Z", Some(&greenwich)).is_empty());
+        assert!(codes(Body::Sun, "2026-06-21T21:10:00Z", Some(&greenwich)).is_empty());
     }
 }

@@ -11,8 +11,6 @@ use crate::series::{SeriesBody, heliocentric};
 
 /// The Sun's gravity, au^3 per day^2: the square of Gauss's constant.
 const SUN_GRAVITY: f64 = 0.017_202_098_95 * 0.017_202_098_95;
-/// Half of the interval over which the Moon's velocity is taken; the error is 4 parts in a million.
-const MOON_RATE_STEP_DAYS: f64 = 0.02;
 
 /// Where a body was when the light that now arrives left it, and how it moved. ICRS axes.
 #[derive(Debug, Clone, Copy, PartialEq)]
@@ -63,12 +61,13 @@ impl Observation {
     }
 
     fn moon(earth: &Earth) -> Self {
-        let before = moon_geocentric_au(earth.tt.plus_days(-MOON_RATE_STEP_DAYS));
-        let after = moon_geocentric_au(earth.tt.plus_days(MOON_RATE_STEP_DAYS));
-        let velocity = scaled(0.5 / MOON_RATE_STEP_DAYS, add_scaled(after, -1.0, before));
         let light_days = LIGHT_DAYS_PER_AU * norm(earth.moon_au);
-        // A light time of 1.3 seconds: the Moon's path is straight to a few millimetres.
-        let from_earth_au = add_scaled(earth.moon_au, -light_days, velocity);
+        let from_earth_au = moon_geocentric_au(earth.tt.plus_days(-light_days));
+        // Over 1.3 seconds the path is straight to a few millimetres; the count of days keeps the speed to 2e-6.
+        let velocity = scaled(
+            1.0 / light_days,
+            add_scaled(earth.moon_au, -1.0, from_earth_au),
+        );
         let earth_then_au = add_scaled(earth.position_au, -light_days, earth.velocity_au_per_day);
         Self {
             body: Body::Moon,

@@ -36,22 +36,23 @@ pub fn reading_table(
         .filter_map(|index| Some((Reading::within(series, *series.utc.get(index)?)?, "")))
         .collect();
     rows.dedup_by_key(|(reading, _)| reading.utc.days_since_j2000());
-    rows.extend(highlights.great_peaks().filter_map(|peak| {
-        let reading = Reading::within(series, peak.utc)?;
-        Some((
-            Reading {
-                magnitude: peak.magnitude,
-                ..reading
-            },
-            words.remark_peak(),
-        ))
-    }));
-    rows.push((*chosen, words.remark_chosen()));
-    rows.sort_unstable_by(|a, b| {
-        a.0.utc
-            .days_since_j2000()
-            .total_cmp(&b.0.utc.days_since_j2000())
-    });
+    let mut insert = |reading: Reading, remark| {
+        let place = rows.partition_point(|(row, _)| row.utc <= reading.utc);
+        rows.insert(place, (reading, remark));
+    };
+    for peak in highlights.great_peaks() {
+        if let Some(reading) = Reading::within(series, peak.utc) {
+            let magnitude = peak.magnitude;
+            insert(
+                Reading {
+                    magnitude,
+                    ..reading
+                },
+                words.remark_peak(),
+            );
+        }
+    }
+    insert(*chosen, words.remark_chosen());
 
     let widest = series
         .angular_diameter_arcsec

@@ -1,7 +1,7 @@
 //! Places as people type them.
 
 use super::Place;
-use crate::error::{Code, Error};
+use crate::error::{Code, Error, quoted};
 
 /// Which of the two angles a text gives: it decides the letters and the range allowed.
 #[derive(Debug, Clone, Copy, PartialEq, Eq)]
@@ -28,15 +28,15 @@ impl Coordinate {
     }
 
     fn refused(self, text: &str) -> Error {
-        let shown: String = text.trim().chars().take(40).collect();
+        let shown = quoted(text);
         Error::new(
             Code::BadPlace,
             match self {
                 Coordinate::Latitude => format!(
-                    "\"{shown}\" is no latitude: write degrees from -90 to 90, for instance 54.5, 54° 30' N or 33,9 S."
+                    "{shown} is no latitude: write degrees from -90 to 90, for instance 54.5, 54° 30' N or 33,9 S."
                 ),
                 Coordinate::Longitude => format!(
-                    "\"{shown}\" is no longitude: write degrees from -180 to 180, for instance -3.2, 3° 12' W or 18,4 E."
+                    "{shown} is no longitude: write degrees from -180 to 180, for instance -3.2, 3° 12' W or 18,4 E."
                 ),
             },
         )

@@ -142,34 +142,38 @@ fn velocity_is_the_change_of_position() {
 }
 
 #[test]
-fn tables_are_read_to_their_last_byte() {
-    let whole = |series: &Series| {
+fn tables_hold_what_the_manifest_counts() -> Result<(), serde_json::Error> {
+    let text = include_str!("../../pkg-config/tables/manifest.json");
+    let manifest: serde_json::Value = serde_json::from_str(text)?;
+    let check = |name: &str, series: &Series| {
+        let counted = &manifest["series"][name];
+        let mut terms = [0_u64; 3];
+        for term in &series.terms {
+            terms[term.slot / POWERS] += 1;
+        }
+        assert_eq!(counted["terms"], serde_json::json!(terms), "{name}");
+        assert_eq!(
+            counted["arguments"].as_u64(),
+            u64::try_from(series.arguments.len()).ok(),
+            "{name}"
+        );
         assert!(
             series
                 .highest
                 .iter()
-                .all(|&highest| highest <= HIGHEST_MULTIPLE)
+                .all(|&highest| highest <= HIGHEST_MULTIPLE),
+            "{name}"
         );
-        assert!(series.terms.iter().all(|term| term.slot < 3 * POWERS));
-        let factors: usize = series
-            .arguments
-            .iter()
-            .map(|argument| argument.factor_count)
-            .sum();
-        let terms: usize = series
-            .arguments
-            .iter()
-            .map(|argument| argument.term_count)
-            .sum();
-        assert_eq!((factors, terms), (series.factors.len(), series.terms.len()));
-        assert!(terms > 30, "{terms} terms");
     };
     let mut planets = Reader::new(planets::BYTES);
-    for _ in BODIES {
-        whole(&planets.series(0));
+    for name in [
+        "mercury", "venus", "emb", "mars", "jupiter", "saturn", "uranus", "neptune",
+    ] {
+        check(name, &planets.series(0));
     }
     assert!(planets.is_finished());
     let mut moon = Reader::new(moon::BYTES);
-    whole(&moon.series(5));
+    check("moon", &moon.series(5));
     assert!(moon.is_finished());
+    Ok(())
 }

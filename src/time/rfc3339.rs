@@ -1,7 +1,7 @@
 //! Reading and writing instants in the form of RFC 3339.
 
 use super::calendar::{bounded, date, days_in_month, from_civil};
-use crate::error::{Code, Error};
+use crate::error::{Code, Error, quoted};
 use crate::quantity::SECONDS_PER_DAY;
 
 /// Days since 2000-01-01T12:00 of an RFC 3339 instant or of a plain date at 0h UTC.
@@ -13,8 +13,11 @@ pub(super) fn parse(text: &str) -> Result<f64, Error> {
     days.ok_or_else(|| {
         Error::new(
             Code::BadInstant,
-            "The instant must be a date such as 2026-11-24, or a date and time with offset such as \
-             2026-11-24T18:30:00Z or 2026-11-24T19:30:00+01:00.",
+            format!(
+                "{} is no instant: give a date of the Gregorian calendar such as 2026-11-24, or a date and time with \
+                 offset such as 2026-11-24T18:30:00Z or 2026-11-24T19:30:00+01:00.",
+                quoted(text)
+            ),
         )
     })
 }

@@ -5,15 +5,15 @@ use serde::Serialize;
 use wasm_bindgen::prelude::*;
 use web_sys::HtmlCanvasElement;
 
+use super::attributes::Attributes;
 use super::canvas::paint;
 use super::host::{Day, Host};
-use super::module::{thrown, write};
+use super::module::{put, thrown, write, write_circumstances};
 use super::scene::Scene;
-use super::settings::{Attributes, Problem, Settings, Spot, View, first_day, last_day, read_date};
-use super::words::{self, State};
+use super::settings::{Problem, Settings, Spot, View, frame_around, read_date};
+use super::words::{self, iso_date};
 use crate::chart::Viewport;
 use crate::error::Error;
-use crate::explain::Table;
 use crate::place::{self, Coordinate, Place};
 
 /// How far the Page keys move, in days.
@@ -84,7 +84,7 @@ impl Exhibit {
 
     /// Everything about the body at the chosen moment.
     pub fn circumstances(&self) -> Result<JsValue, JsValue> {
-        write(&self.scene.now)
+        write_circumstances(&self.scene.now)
     }
 
     /// The chosen date and, where the visitor or the page gave one, the place.
@@ -98,7 +98,7 @@ impl Exhibit {
             _ => None,
         };
         write(&Choices {
-            date: self.iso_date(),
+            date: iso_date(self.settings.day),
             place,
         })
     }
@@ -110,32 +110,30 @@ impl Exhibit {
 
     /// Words and slider positions for the chosen date.
     pub fn state(&self) -> Result<JsValue, JsValue> {
-        let words = words::tell(&self.settings, &self.host, &self.scene, self.horizon_up);
-        write(&State {
-            date: self.iso_date(),
-            day: self.settings.day,
-            first_day: self.frame.0,
-            last_day: self.frame.1,
-            horizon_up: self.horizon_up,
-            words,
-        })
+        write(&words::state(
+            &self.settings,
+            &self.host,
+            &self.scene,
+            self.frame,
+            self.horizon_up,
+        ))
     }
 
     /// The picture's numbers: `{ caption, head, rows, marked }`, `marked` being the chosen row.
     pub fn table(&self) -> Result<JsValue, JsValue> {
-        #[derive(Serialize)]
-        struct Marked {
-            #[serde(flatten)]
-            table: Table,
-            marked: Option<usize>,
-        }
         let table = self.scene.table(&self.host);
         let chosen = words::chosen_remark();
         let marked = table
             .rows
             .iter()
             .position(|row| row.last().is_some_and(|remark| remark == chosen));
-        write(&Marked { table, marked })
+        let object = write(&table)?;
+        put(
+            object.unchecked_ref(),
+            "marked",
+            &marked.map_or(JsValue::NULL, |row| (row as f64).into()),
+        );
+        Ok(object)
     }
 
     /// Moves to the date under a pointer, `x_css` from the left edge of the canvas.
@@ -295,21 +293,4 @@ impl Exhibit {
             .map_err(thrown)?;
         Ok(())
     }
-
-    fn iso_date(&self) -> String {
-        // Noon of the count's own day: its date in UTC is the calendar date of the zone.
-        let utc = crate::Utc::from_days_since_j2000(self.settings.day as f64);
-        utc.to_rfc3339()
-            .chars()
-            .take_while(|&letter| letter != 'T')
-            .collect()
-    }
-}
-
-/// The frame of a span with a day in its middle, held within the years that the series cover.
-fn frame_around(day: Day, span_days: i64) -> (Day, Day) {
-    let first = (day - span_days / 2)
-        .min(last_day() - span_days)
-        .max(first_day());
-    (first, first + span_days)
 }

@@ -98,7 +98,7 @@ impl Host {
 
     /// Civil time of the zone minus UTC, in days.
     fn offset_days(&self, utc: Utc) -> f64 {
-        let mut field = [2000.0, 1.0, 1.0, 0.0, 0.0, 0.0];
+        let mut field = [2000, 1, 1, 0, 0, 0];
         for part in self.fields.format_to_parts(&js_date(utc)).iter() {
             let kind = text(&part, "type");
             let names = ["year", "month", "day", "hour", "minute", "second"];
@@ -107,8 +107,8 @@ impl Host {
             }
         }
         let [year, month, day, hour, minute, second] = field;
-        let seconds_of_day = hour * 3600.0 + minute * 60.0 + second;
-        match Utc::from_civil(year as i32, month as u8, day as u8, seconds_of_day) {
+        let seconds_of_day = f64::from(hour * 3600 + minute * 60 + second);
+        match Utc::from_civil(year, month as u8, day as u8, seconds_of_day) {
             // The browser drops fractions of a second; the nearest second is what was meant.
             Ok(civil) => {
                 ((civil.days_since_j2000() - utc.days_since_j2000()) * 86_400.0).round() / 86_400.0
@@ -161,7 +161,7 @@ impl Formats for Host {
                     .ok()?
                     .as_string()
             })
-            .unwrap_or_else(|| format!("{value:.*}", usize::from(decimals)));
+            .unwrap_or_else(|| value.to_string());
         // The browser writes a hyphen; a true minus sign lines up with the digits.
         written.replace('-', "\u{2212}")
     }

@@ -3,6 +3,7 @@
 //! This is the only place that knows wasm-bindgen, web-sys and js-sys, and the only one that reads a clock,
 //! a zone or a language.
 
+mod attributes;
 mod canvas;
 pub mod exhibit;
 mod host;

@@ -5,7 +5,7 @@ use serde::Serialize;
 use wasm_bindgen::prelude::*;
 
 use crate::error::{Code, Error};
-use crate::{Place, Utc};
+use crate::{Circumstances, Place, Utc};
 
 #[wasm_bindgen(typescript_custom_section)]
 const TYPES: &str = include_str!("types.d.ts");
@@ -39,7 +39,7 @@ pub fn circumstances(
             place.as_ref(),
         )
     };
-    write(&answer().map_err(thrown)?)
+    write_circumstances(&answer().map_err(thrown)?)
 }
 
 /// One body over a span of days; see `Series` in the declarations.
@@ -151,6 +151,18 @@ pub(super) fn write(value: &impl Serialize) -> Result<JsValue, JsValue> {
         .serialize_maps_as_objects(true)
         .serialize_missing_as_null(true);
     value.serialize(&serializer).map_err(JsValue::from)
+}
+
+/// Circumstances with the keys of the place, where there is one, beside the others.
+pub(super) fn write_circumstances(now: &Circumstances) -> Result<JsValue, JsValue> {
+    let object = write(now)?;
+    if let Some(local) = &now.local {
+        Object::assign(
+            object.unchecked_ref::<Object>(),
+            write(local)?.unchecked_ref(),
+        );
+    }
+    Ok(object)
 }
 
 /// An `Error` whose `code` a program can test.

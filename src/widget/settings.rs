@@ -1,47 +1,15 @@
 //! The element's attributes as the exhibit uses them. A bad value leaves the default and becomes a problem to show.
 
-use js_sys::Reflect;
 use serde::Serialize;
-use wasm_bindgen::JsValue;
 
+use super::attributes::Attributes;
 use super::host::{Day, Host};
-use crate::chart::{Colour, Theme};
-use crate::error::{Code, Error};
+use crate::chart::Theme;
+use crate::error::{Code, Error, quoted};
 use crate::explain::Units;
 use crate::place::{self, Place};
 use crate::time::Utc;
 use crate::{Body, series};
-
-/// Attributes as the page gives them: a plain object of texts, absent ones null, with `prefersDark` and `colours`.
-pub(super) struct Attributes(JsValue);
-
-impl Attributes {
-    pub(super) fn new(attributes: JsValue) -> Self {
-        Self(attributes)
-    }
-
-    /// The text of one attribute, trimmed; `None` where there is none.
-    pub(super) fn text(&self, name: &str) -> Option<String> {
-        let text = get(&self.0, name).as_string()?;
-        Some(text.trim().to_owned()).filter(|text| !text.is_empty())
-    }
-
-    fn prefers_dark(&self) -> bool {
-        get(&self.0, "prefersDark").is_truthy()
-    }
-
-    /// A custom property of the form `#rrggbb`; other forms leave the theme's own colour.
-    fn colour(&self, name: &str) -> Option<Colour> {
-        let text = get(&get(&self.0, "colours"), name).as_string()?;
-        let digits = text.strip_prefix('#').filter(|digits| digits.len() == 6)?;
-        let channel = |at: usize| u8::from_str_radix(digits.get(at..at + 2)?, 16).ok();
-        Some(Colour(channel(0)?, channel(2)?, channel(4)?))
-    }
-}
-
-fn get(object: &JsValue, key: &str) -> JsValue {
-    Reflect::get(object, &key.into()).unwrap_or(JsValue::UNDEFINED)
-}
 
 /// One attribute that could not be used.
 #[derive(Debug, Serialize)]
@@ -198,10 +166,10 @@ fn read_units(text: &str) -> Result<Units, Error> {
 }
 
 fn not_among(what: &str, text: &str, known: &str) -> Error {
-    let shown: String = text.chars().take(40).collect();
+    let shown = quoted(text);
     Error::new(
         Code::BadOption,
-        format!("There is no {what} \"{shown}\" here; choose one of {known}."),
+        format!("There is no {what} {shown} here; choose one of {known}."),
     )
 }
 
@@ -230,12 +198,12 @@ pub(super) fn read_date(text: &str, host: &Host) -> Result<Day, Error> {
 }
 
 /// First day that a frame may show: one day inside the series' span, whatever the zone.
-pub(super) fn first_day() -> Day {
+fn first_day() -> Day {
     (f64::from(series::VALID_FROM_YEAR - 2000) * 365.2425).ceil() as Day + 2
 }
 
 /// Last day that a frame may show.
-pub(super) fn last_day() -> Day {
+fn last_day() -> Day {
     (f64::from(series::VALID_TO_YEAR - 2000) * 365.2425).floor() as Day - 2
 }
 
@@ -250,6 +218,14 @@ fn read_span(text: &str) -> Result<i64, Error> {
                 format!("The span is a whole number of days from {least} to {most}."),
             )
         })
+}
+
+/// The frame of a span with a day in its middle, held within the years that the series cover.
+pub(super) fn frame_around(day: Day, span_days: i64) -> (Day, Day) {
+    let first = (day - span_days / 2)
+        .min(last_day() - span_days)
+        .max(first_day());
+    (first, first + span_days)
 }
 
 /// Long enough to show how a round of phases rises and falls, short enough to read a day.

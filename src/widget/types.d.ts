@@ -83,6 +83,8 @@ export interface Circumstances {
   apparentAltitudeDeg?: number;
   /** With a place: azimuth from north through east, degrees. */
   azimuthDeg?: number;
+  /** With a place: direction of the zenith, degrees from celestial north through east. */
+  parallacticAngleDeg?: number;
   /** With a place: magnitude dimmed by the air at that altitude; null below the horizon or without a magnitude. */
   apparentMagnitude?: number | null;
   warnings: Warning[];

@@ -15,6 +15,7 @@ use crate::explain::{
     sentence_tradeoff,
 };
 use crate::quantity::AU_KM;
+use crate::time::Utc;
 
 /// Within this angle from the Sun a body is not to be searched for without the caution.
 const CAUTION_ELONGATION_DEG: f64 = 20.0;
@@ -73,18 +74,11 @@ pub(super) fn furniture(settings: &Settings, host: &Host) -> Object {
 #[derive(Serialize)]
 #[serde(rename_all = "camelCase")]
 pub(super) struct State {
-    pub(super) date: String,
-    pub(super) day: Day,
-    pub(super) first_day: Day,
-    pub(super) last_day: Day,
-    pub(super) horizon_up: bool,
-    #[serde(flatten)]
-    pub(super) words: Told,
-}
-
-/// Sentences for the chosen date.
-#[derive(Serialize)]
-pub(super) struct Told {
+    date: String,
+    day: Day,
+    first_day: Day,
+    last_day: Day,
+    horizon_up: bool,
     sentence: String,
     place: String,
     caution: String,
@@ -92,8 +86,14 @@ pub(super) struct Told {
     description: String,
 }
 
-/// Everything that is told about the chosen date.
-pub(super) fn tell(settings: &Settings, host: &Host, scene: &Scene, horizon_up: bool) -> Told {
+/// Slider positions and everything that is told about the chosen date.
+pub(super) fn state(
+    settings: &Settings,
+    host: &Host,
+    scene: &Scene,
+    (first_day, last_day): (Day, Day),
+    horizon_up: bool,
+) -> State {
     let body = settings.body;
     let figures = figures(host);
     let (sentence, picture) = match settings.view {
@@ -120,13 +120,25 @@ pub(super) fn tell(settings: &Settings, host: &Host, scene: &Scene, horizon_up: 
         .filter(|&elongation_deg| elongation_deg < CAUTION_ELONGATION_DEG)
         .map(|elongation_deg| English.caution(body, &figures.number(elongation_deg, 0)))
         .unwrap_or_default();
-    Told {
+    State {
+        date: iso_date(settings.day),
+        day: settings.day,
+        first_day,
+        last_day,
+        horizon_up,
         description: format!("{picture}. {sentence}"),
         sentence,
         place: place.join(" "),
         caution,
         announcement: announce(&scene.reading(), figures),
     }
+}
+
+/// A calendar day as the date field of a page writes it.
+pub(super) fn iso_date(day: Day) -> String {
+    // Noon of the count's own day: its date in UTC is the calendar date of the zone.
+    let text = Utc::from_days_since_j2000(day as f64).to_rfc3339();
+    text.split('T').next().unwrap_or_default().to_owned()
 }
 
 /// The remark that marks the chosen row of the table.

@@ -81,8 +81,13 @@ function methods(tools, pages) {
     /** Waits until as many elements have drawn as the page has, or the number given. */
     async ready(count) {
       const wanted = count ?? (await run("return document.querySelectorAll('wander-light').length"));
-      const drawn = () => run("return [...document.querySelectorAll('wander-light')].filter((e) => e.shadowRoot?.querySelector('figure')?.dataset.state === 'ready').length");
+      // An element loads when it comes near the viewport, so each that is not drawn yet is scrolled to.
+      const drawn = () => run(`
+        const waiting = [...document.querySelectorAll("wander-light")].filter((e) => e.shadowRoot?.querySelector("figure")?.dataset.state !== "ready");
+        waiting[0]?.scrollIntoView();
+        return document.querySelectorAll("wander-light").length - waiting.length;`);
       await tools.driver.wait(async () => (await drawn()) >= wanted, 15_000, "the elements did not become ready");
+      await run("scrollTo(0, 0)");
       await this.painted();
     },
 
