@@ -4,7 +4,7 @@
 // so that the page's text and the canvas can never disagree.
 
 export const template = `
-<figure id="figure" part="figure" data-state="waiting">
+<figure id="figure" part="figure" data-state="waiting" lang="en">
   <div id="stage" part="stage"><canvas id="canvas" part="canvas" role="img"></canvas><slot></slot></div>
   <p id="notice" part="notice" role="status" hidden></p>
   <div id="controls" part="controls">
@@ -22,6 +22,7 @@ export const template = `
   <details id="numbers" part="numbers">
     <summary id="numberslabel"></summary>
     <div class="scroll" tabindex="0"><table><caption id="caption"></caption><thead id="head"></thead><tbody id="rows"></tbody></table></div>
+    <p id="remarks"></p>
   </details>
   <details id="where" part="place">
     <summary id="placelabel"></summary>
@@ -78,7 +79,7 @@ figcaption { min-height: 18.5rem; }
 @container (min-width: 400px) { figcaption { min-height: 12.5rem; } }
 @container (min-width: 646px) { figcaption { min-height: 9.5rem; } }
 figcaption p, #notice { margin: 0.5rem 0 0; max-width: 44rem; }
-#placeline, #placehint { color: var(--soft, inherit); }
+#placeline, #placehint, #remarks { color: var(--soft, inherit); }
 #caution, #notice { border-left: 0.25rem solid var(--accent, Highlight); padding-left: 0.6rem; }
 details { margin-top: 0.5rem; }
 summary { min-height: 1.75rem; cursor: pointer; color: var(--soft, inherit); }

@@ -11,8 +11,6 @@ import {
 
 const TAG = "wander-light";
 const SETTINGS = ["body", "view", "date", "span", "place", "zone", "lang", "theme", "units", "group"];
-/** Start loading when the element comes within this distance of the viewport. */
-const NEAR_VIEWPORT = "600px";
 
 class WanderLight extends HTMLElement {
   static observedAttributes = SETTINGS;
@@ -30,11 +28,12 @@ class WanderLight extends HTMLElement {
     if (!this.#parts) this.#buildShadow();
     this.#joinGroup();
     this.#cleanup = new AbortController();
+    // Loading starts when the element comes near the viewport.
     const near = new IntersectionObserver((entries) => {
       if (!entries.some((entry) => entry.isIntersecting)) return;
       near.disconnect();
       this.#start();
-    }, { rootMargin: NEAR_VIEWPORT });
+    }, { rootMargin: "600px" });
     near.observe(this);
     this.#cleanup.signal.addEventListener("abort", () => near.disconnect());
   }
@@ -107,7 +106,7 @@ class WanderLight extends HTMLElement {
 
   #configure() {
     const settings = Object.fromEntries(SETTINGS.map((name) => [camelCase(name), this.getAttribute(name)]));
-    settings.lang ??= this.closest("[lang]")?.lang ?? navigator.language;
+    settings.pageLang = this.parentElement?.closest("[lang]")?.lang || navigator.language;
     settings.prefersDark = matchMedia("(prefers-color-scheme: dark)").matches;
     const look = getComputedStyle(this);
     settings.colours = Object.fromEntries(
@@ -142,10 +141,11 @@ class WanderLight extends HTMLElement {
     p.slider.max = state.lastDay;
     p.slider.value = state.day;
     p.slider.setAttribute("aria-valuetext", state.announcement);
-    if (p.picker.value !== state.date) p.picker.value = state.date;
+    p.picker.value = state.date;
     p.canvas.setAttribute("aria-label", state.description);
     p.sentence.textContent = state.sentence;
     p.placeline.textContent = state.place;
+    p.remarks.textContent = state.remarks;
     p.caution.textContent = state.caution;
     p.caution.hidden = !state.caution;
     p.horizonup.checked = state.horizonUp;

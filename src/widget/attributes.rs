@@ -1,9 +1,11 @@
 //! The object in which the element class hands over its attributes.
 
 use js_sys::Reflect;
+use serde::Serialize;
 use wasm_bindgen::JsValue;
 
 use crate::chart::Colour;
+use crate::error::Error;
 
 /// Attributes as the page gives them: a plain object of texts, absent ones null, with `prefersDark` and `colours`.
 pub(super) struct Attributes(JsValue);
@@ -34,4 +36,22 @@ impl Attributes {
 
 fn get(object: &JsValue, key: &str) -> JsValue {
     Reflect::get(object, &key.into()).unwrap_or(JsValue::UNDEFINED)
+}
+
+/// One attribute that could not be used.
+#[derive(Debug, Serialize)]
+pub(super) struct Problem {
+    attribute: &'static str,
+    code: &'static str,
+    message: String,
+}
+
+impl Problem {
+    pub(super) fn new(attribute: &'static str, error: &Error) -> Self {
+        Self {
+            attribute,
+            code: error.code().as_str(),
+            message: error.message().to_owned(),
+        }
+    }
 }

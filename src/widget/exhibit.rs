@@ -5,12 +5,12 @@ use serde::Serialize;
 use wasm_bindgen::prelude::*;
 use web_sys::HtmlCanvasElement;
 
-use super::attributes::Attributes;
+use super::attributes::{Attributes, Problem};
 use super::canvas::paint;
-use super::host::{Day, Host};
+use super::host::{Day, Host, read_host};
 use super::module::{put, thrown, write, write_circumstances};
 use super::scene::Scene;
-use super::settings::{Problem, Settings, Spot, View, frame_around, read_date};
+use super::settings::{Settings, Spot, View, frame_around, read_date};
 use super::words::{self, iso_date};
 use crate::chart::Viewport;
 use crate::error::Error;
@@ -218,7 +218,7 @@ impl Exhibit {
 
 impl Exhibit {
     fn build(attributes: &Attributes) -> Result<(Self, Vec<Problem>), Error> {
-        let (host, mut problems) = Self::host(attributes)?;
+        let (host, mut problems) = read_host(attributes)?;
         let (settings, more) = Settings::read(attributes, &host);
         problems.extend(more);
         let frame = frame_around(settings.day, settings.span_days);
@@ -234,28 +234,6 @@ impl Exhibit {
             },
             problems,
         ))
-    }
-
-    /// A host with the zone and language asked for, or with the browser's where they cannot be used.
-    fn host(attributes: &Attributes) -> Result<(Host, Vec<Problem>), Error> {
-        let lang = attributes.text("lang").unwrap_or_else(|| "en".to_owned());
-        let mut problems = Vec::new();
-        let zone = attributes.text("zone");
-        let zone = zone.as_deref().filter(|zone| {
-            let outcome = Host::new("en", Some(zone));
-            problems.extend(
-                outcome
-                    .as_ref()
-                    .err()
-                    .map(|error| Problem::new("zone", error)),
-            );
-            outcome.is_ok()
-        });
-        let host = Host::new(&lang, zone).or_else(|error| {
-            problems.push(Problem::new("lang", &error));
-            Host::new("en", zone)
-        });
-        host.map(|host| (host, problems))
     }
 
     fn target_of(&self, key: &str) -> Option<Day> {

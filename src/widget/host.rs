@@ -5,7 +5,8 @@ use std::cell::RefCell;
 use js_sys::{Array, Date, Function, Intl, Object, Reflect};
 use wasm_bindgen::{JsCast, JsValue};
 
-use crate::error::{Code, Error};
+use super::attributes::{Attributes, Problem};
+use crate::error::{Code, Error, quoted};
 use crate::explain::{DateForm, Formats};
 use crate::time::Utc;
 
@@ -65,7 +66,10 @@ impl Host {
         construct("NumberFormat", lang, &Object::new()).map_err(|()| {
             Error::new(
                 Code::BadOption,
-                format!("\"{lang}\" is no language tag; one is written like en or en-GB."),
+                format!(
+                    "{} is no language tag; one is written like en or en-GB.",
+                    quoted(lang)
+                ),
             )
         })?;
         Ok(host)
@@ -176,6 +180,46 @@ impl Formats for Host {
             })
             .unwrap_or_else(|| utc.to_rfc3339())
     }
+}
+
+/// A host with the zone and language asked for, or with the browser's zone and English where they cannot be used.
+pub(super) fn read_host(attributes: &Attributes) -> Result<(Host, Vec<Problem>), Error> {
+    let mut problems = Vec::new();
+    let mut note = |attribute, error| problems.push(Problem::new(attribute, &error));
+    let zone = attributes.text("zone");
+    let zone = zone.as_deref().filter(|zone| {
+        let outcome = Host::new(ENGLISH, Some(zone));
+        outcome.map_err(|error| note("zone", error)).is_ok()
+    });
+    let english = || ENGLISH.to_owned();
+    let lang = match attributes.text("lang") {
+        Some(asked) => read_lang(asked).unwrap_or_else(|error| {
+            note("lang", error);
+            english()
+        }),
+        // A page in another language is no mistake of the element's; its words are English all the same.
+        None => attributes
+            .text("pageLang")
+            .and_then(|lang| read_lang(lang).ok())
+            .unwrap_or_else(english),
+    };
+    Ok((Host::new(&lang, zone)?, problems))
+}
+
+/// The language of the words there are.
+const ENGLISH: &str = "en";
+
+fn read_lang(tag: String) -> Result<String, Error> {
+    Host::new(&tag, None)?;
+    let primary = tag.split(['-', '_']).next().unwrap_or_default();
+    if primary.eq_ignore_ascii_case(ENGLISH) {
+        return Ok(tag);
+    }
+    let message = format!(
+        "There are no words in {} here; choose en or a region of it such as en-GB.",
+        quoted(&tag)
+    );
+    Err(Error::new(Code::BadOption, message))
 }
 
 /// Making a formatter costs the browser a hundred times what using it does.

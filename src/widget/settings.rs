@@ -1,8 +1,6 @@
 //! The element's attributes as the exhibit uses them. A bad value leaves the default and becomes a problem to show.
 
-use serde::Serialize;
-
-use super::attributes::Attributes;
+use super::attributes::{Attributes, Problem};
 use super::host::{Day, Host};
 use crate::chart::Theme;
 use crate::error::{Code, Error, quoted};
@@ -10,24 +8,6 @@ use crate::explain::Units;
 use crate::place::{self, Place};
 use crate::time::Utc;
 use crate::{Body, series};
-
-/// One attribute that could not be used.
-#[derive(Debug, Serialize)]
-pub(super) struct Problem {
-    attribute: &'static str,
-    code: &'static str,
-    message: String,
-}
-
-impl Problem {
-    pub(super) fn new(attribute: &'static str, error: &Error) -> Self {
-        Self {
-            attribute,
-            code: error.code().as_str(),
-            message: error.message().to_owned(),
-        }
-    }
-}
 
 /// The pictures an element can show.
 #[derive(Debug, Clone, Copy, PartialEq, Eq)]

@@ -19,6 +19,11 @@ use crate::time::Utc;
 
 /// Within this angle from the Sun a body is not to be searched for without the caution.
 const CAUTION_ELONGATION_DEG: f64 = 20.0;
+const WEIGHTY_WARNINGS: [&str; 3] = [
+    "magnitude-extrapolated",
+    "magnitude-undefined",
+    "outside-checked-span",
+];
 /// Below this distance it is told in whole kilometres or miles rather than millions.
 const FAR_KM: f64 = 1e6;
 
@@ -82,6 +87,7 @@ pub(super) struct State {
     sentence: String,
     place: String,
     caution: String,
+    remarks: String,
     announcement: String,
     description: String,
 }
@@ -113,6 +119,17 @@ pub(super) fn state(
     if horizon_up {
         place.push(English.lean(body, night_edge(&scene.now)));
     }
+    // What limits the picture itself is said with it; what only limits the last digit stands with the numbers.
+    let warnings = &scene.now.warnings;
+    let weighty = warnings
+        .iter()
+        .filter(|warning| WEIGHTY_WARNINGS.contains(&warning.code));
+    place.extend(weighty.map(|warning| warning.message.clone()));
+    let mut remarks = String::new();
+    for warning in warnings {
+        remarks.push_str(&warning.message);
+        remarks.push(' ');
+    }
     place.retain(|line| !line.is_empty());
     let caution = scene
         .now
@@ -130,6 +147,7 @@ pub(super) fn state(
         sentence,
         place: place.join(" "),
         caution,
+        remarks,
         announcement: announce(&scene.reading(), figures),
     }
 }
