@@ -63,7 +63,7 @@ slot { display: block; height: 100%; overflow: auto; cursor: auto; }
 [data-state="waiting"] :is(#controls, figcaption, details) { visibility: hidden; }
 #controls { display: flex; flex-wrap: wrap; gap: 0.4rem 0.9rem; align-items: center; margin-top: 0.5rem; min-height: 4.75rem; align-content: flex-start; }
 .slide { flex: 1 0 100%; display: block; }
-#slider { width: 100%; margin: 0; min-height: 1.75rem; accent-color: var(--accent, auto); }
+#slider { width: 100%; margin: 0; box-sizing: border-box; min-height: 1.75rem; accent-color: var(--accent, auto); }
 .tick { display: inline-flex; align-items: center; gap: 0.4rem; min-height: 2rem; }
 .tick[hidden] { display: none; }
 .tick input { width: 1.25rem; height: 1.25rem; accent-color: var(--accent, auto); }
@@ -83,7 +83,7 @@ figcaption p, #notice { margin: 0.5rem 0 0; max-width: 44rem; }
 #caution, #notice { border-left: 0.25rem solid var(--accent, Highlight); padding-left: 0.6rem; }
 details { margin-top: 0.5rem; }
 summary { min-height: 1.75rem; cursor: pointer; color: var(--soft, inherit); }
-@container (max-width: 500px) { #placelabel { min-height: 3rem; } }
+@container (max-width: 505px) { #placelabel { min-height: 3rem; } }
 .scroll { overflow-x: auto; }
 table { border-collapse: collapse; font-size: 0.9rem; font-variant-numeric: tabular-nums; }
 caption { text-align: start; padding: 0.25rem 0; color: var(--soft, inherit); }

@@ -79,3 +79,14 @@ export function devicePosition() {
     navigator.geolocation.getCurrentPosition(found, () => resolve(), settings);
   });
 }
+
+/** What the page around an element says about language and colours. */
+export function surroundings(element) {
+  const look = getComputedStyle(element);
+  const colour = (name) => [name, look.getPropertyValue(`--wanderlight-${name}`).trim()];
+  return {
+    pageLang: element.parentElement?.closest("[lang]")?.lang || navigator.language,
+    prefersDark: matchMedia("(prefers-color-scheme: dark)").matches,
+    colours: Object.fromEntries(["paper", "ink", "accent"].map(colour)),
+  };
+}

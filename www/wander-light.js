@@ -1,12 +1,13 @@
 // The custom element <wander-light>: what a page needs around the module and Rust cannot be.
 //
-// It holds attributes, loads the module once per page, hands events to the Rust `Exhibit` and puts the
-// exhibit's words and picture into its shadow tree. It computes nothing about the sky and owns no wording.
+// It holds attributes, has the module loaded once per page, hands events to the Rust `Exhibit` and puts the exhibit's
+// words and picture into its shadow tree. It computes nothing about the sky and owns no wording.
 
 import { Exhibit } from "./wanderlight.js";
 import { fillTable, styles, template } from "./wander-light-shadow.js";
 import {
-  brokenMessage, camelCase, companions, devicePosition, joinGroup, leaveGroup, loadModule, onDensityChange, reflectAttributes,
+  brokenMessage, camelCase, companions, devicePosition, joinGroup, leaveGroup, loadModule, onDensityChange,
+  reflectAttributes, surroundings,
 } from "./wander-light-shared.js";
 
 const TAG = "wander-light";
@@ -106,15 +107,8 @@ class WanderLight extends HTMLElement {
 
   #configure() {
     const settings = Object.fromEntries(SETTINGS.map((name) => [camelCase(name), this.getAttribute(name)]));
-    settings.pageLang = this.parentElement?.closest("[lang]")?.lang || navigator.language;
-    settings.prefersDark = matchMedia("(prefers-color-scheme: dark)").matches;
-    const look = getComputedStyle(this);
-    settings.colours = Object.fromEntries(
-      ["paper", "ink", "accent"].map((name) => [name, look.getPropertyValue(`--wanderlight-${name}`).trim()]),
-    );
-    const problems = this.#exhibit.configure({ ...settings, ...this.#resume });
-    this.#parts.notice.textContent = problems.map((problem) => problem.message).join(" ");
-    this.#parts.notice.hidden = problems.length === 0;
+    const problems = this.#exhibit.configure({ ...settings, ...surroundings(this), ...this.#resume });
+    this.#notify(problems.map((problem) => problem.message).join(" "));
     for (const problem of problems) {
       const key = `${problem.attribute}\n${problem.message}`;
       if (!this.#reported.has(key)) this.#fire("wanderlight-error", problem);
@@ -129,7 +123,7 @@ class WanderLight extends HTMLElement {
     const { labels, palette, view, hasPlace } = this.#exhibit.furniture();
     const p = this.#parts;
     for (const [name, colour] of Object.entries(palette)) p.figure.style.setProperty(`--${name}`, colour);
-    for (const [id, text] of Object.entries(labels)) if (p[id]) p[id].textContent = text;
+    for (const [id, text] of Object.entries(labels)) p[id].textContent = text;
     p.up.hidden = view !== "disc" || !hasPlace;
   }
 
@@ -163,7 +157,10 @@ class WanderLight extends HTMLElement {
   #draw() {
     const { stage, canvas } = this.#parts;
     const { width, height } = stage.getBoundingClientRect();
-    if (width >= 1 && height >= 1) this.#exhibit.draw(canvas, width, height, devicePixelRatio);
+    if (width < 1 || height < 1) return;
+    const [left, right] = this.#exhibit.draw(canvas, width, height, devicePixelRatio);
+    // The slider lies under the date axis, half its thumb beyond each end.
+    this.#parts.slider.style.cssText = `margin-left: ${left - 8}px; width: ${right - left + 16}px`;
   }
 
   #listen(signal) {
@@ -284,9 +281,13 @@ class WanderLight extends HTMLElement {
     this.#leaveGroup();
     this.#exhibit = undefined;
     this.#parts.figure.dataset.state = "failed";
-    this.#parts.notice.textContent = message;
-    this.#parts.notice.hidden = false;
+    this.#notify(message);
     this.#fire("wanderlight-error", { code, message, cause });
+  }
+
+  #notify(text) {
+    this.#parts.notice.textContent = text;
+    this.#parts.notice.hidden = !text;
   }
 
   #fire(type, detail) {

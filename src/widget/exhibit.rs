@@ -69,17 +69,20 @@ impl Exhibit {
         write(&problems)
     }
 
-    /// Draws on a canvas of the given size in CSS pixels.
+    /// Draws on a canvas of the given size in CSS pixels; returns where the date axis begins and ends.
     pub fn draw(
         &mut self,
         canvas: HtmlCanvasElement,
         width_css: f64,
         height_css: f64,
         density: f64,
-    ) -> Result<(), JsValue> {
+    ) -> Result<Vec<f64>, JsValue> {
         self.width_css = width_css;
         let view = Viewport::new(width_css, height_css, density);
-        paint(canvas, &self.scene.picture, &view, &self.settings.theme).map_err(thrown)
+        let picture = &self.scene.picture;
+        paint(canvas, picture, &view, &self.settings.theme).map_err(thrown)?;
+        let end = |day| picture.x_of_date(self.host.noon(day), &view);
+        Ok(vec![end(self.frame.0), end(self.frame.1)])
     }
 
     /// Everything about the body at the chosen moment.

@@ -121,7 +121,7 @@ test("nothing on the page moves while the chart loads", async () => {
   try {
     for (const width of [360, 900]) {
       await page.screen(width, 900);
-      await page.open(`${element(GOOD)}<p>After the chart.</p>`);
+      await page.open(`${element(GOOD)}<p>After the chart.</p>`, { head: `<link rel="stylesheet" href="/wander-light.css">` });
       await page.ready();
       await page.painted();
       assert.ok((await page.run("return shift")) < 0.02, `layout shift ${await page.run("return shift")} at ${width} px`);
