@@ -31,7 +31,7 @@ fn venus_is_explained_on_every_side_of_its_peak() {
     );
     assert_eq!(
         said(day(2026, 10, 5)),
-        "On 5 October 2026 Venus is larger (51 arcseconds) than when brightest on 23 September 2026 (42 arcseconds), but so little of it is lit, 11\u{a0}% against 22\u{a0}%, that it sends less light: magnitude −4.7 against −4.8."
+        "On 5 October 2026 Venus is larger (51 arcseconds) than when brightest on 23 September 2026 (42 arcseconds), but less of it is lit, 11\u{a0}% against 22\u{a0}%, and that loses more light than the size gains: magnitude −4.7 against −4.8."
     );
     assert_eq!(
         said(day(2027, 2, 20)),

@@ -10,7 +10,6 @@ import {
   reflectAttributes, surroundings,
 } from "./wander-light-shared.js";
 
-const TAG = "wander-light";
 const SETTINGS = ["body", "view", "date", "span", "place", "zone", "lang", "theme", "units", "group"];
 
 class WanderLight extends HTMLElement {
@@ -298,4 +297,4 @@ class WanderLight extends HTMLElement {
 reflectAttributes(WanderLight.prototype, SETTINGS);
 
 // A page that includes the script twice, or a second copy of it, keeps the first.
-if (!customElements.get(TAG)) customElements.define(TAG, WanderLight);
+if (!customElements.get("wander-light")) customElements.define("wander-light", WanderLight);

@@ -73,7 +73,7 @@ pub(super) fn tradeoff(name: &str, story: &Story) -> String {
             "On {date} {name} is about as bright as it gets, magnitude {magnitude}: {diameter} across, with {lit} of its disc lit."
         ),
         Story::ThinnerThanPeak(now, peak) => format!(
-            "On {} {name} is larger ({}) than when brightest on {} ({}), but so little of it is lit, {} against {}, that it sends less light: magnitude {} against {}.",
+            "On {} {name} is larger ({}) than when brightest on {} ({}), but less of it is lit, {} against {}, and that loses more light than the size gains: magnitude {} against {}.",
             now.date,
             now.diameter,
             peak.date,
