@@ -3,15 +3,16 @@
 use crate::bindgen;
 use crate::compile::{Compilation, compile};
 use crate::inline;
+use crate::minify::Minifier;
 use crate::optimise::Optimiser;
 use crate::pins;
 use crate::size;
 use crate::workspace::{Workspace, read, read_text, write};
-use std::collections::BTreeSet;
+use std::collections::{BTreeMap, BTreeSet};
 use std::path::{Path, PathBuf};
 use std::time::Instant;
 
-/// Whether the module in `dist/` went through the optimiser.
+/// Whether what lies in `dist/` went through the optimiser and the minifier.
 #[derive(Debug, Clone, PartialEq, Eq)]
 pub enum Optimisation {
     Done,
@@ -34,14 +35,19 @@ pub fn build(workspace: &Workspace) -> Result<Optimisation, String> {
     )?;
     let glued = bindgen::glue(&raw, &workspace.steps().join("glue"))?;
     let (wasm, optimisation) = optimised(workspace, &glued.wasm)?;
+    let (scripts, minification) = minified(workspace, &glued.javascript)?;
     let mut dist = Dist::new(workspace.dist());
     dist.put("wanderlight.wasm", &wasm)?;
-    dist.put("wanderlight.js", &glued.javascript)?;
     dist.put("wanderlight.d.ts", &glued.declarations)?;
     let pages = workspace.root.join("www");
     for path in files_below(&pages)? {
         let name = relative(&pages, &path);
-        dist.put(&name, &read(&path)?)?;
+        if !scripts.contains_key(&name) {
+            dist.put(&name, &read(&path)?)?;
+        }
+    }
+    for (name, script) in &scripts {
+        dist.put(name, script)?;
     }
     for name in ["README.md", "CHANGELOG.md", "LICENSE-MIT", "LICENSE-APACHE"] {
         let path = workspace.root.join(name);
@@ -67,7 +73,41 @@ pub fn build(workspace: &Workspace) -> Result<Optimisation, String> {
         wasm.len(),
         single.len()
     );
-    Ok(optimisation)
+    Ok(match optimisation {
+        Optimisation::Done => minification,
+        left_out => left_out,
+    })
+}
+
+/// The glue and the scripts of the pages by name, minified; without a minifier as they are, after saying so.
+fn minified(
+    workspace: &Workspace,
+    glue: &[u8],
+) -> Result<(BTreeMap<String, Vec<u8>>, Optimisation), String> {
+    let pages = workspace.root.join("www");
+    let mut scripts = BTreeMap::from([("wanderlight.js".to_string(), glue.to_vec())]);
+    for path in files_below(&pages)? {
+        if path.extension().is_some_and(|ending| ending == "js") {
+            let name = relative(&pages, &path);
+            if scripts.insert(name.clone(), read(&path)?).is_some() {
+                return Err(format!("Two sources want to be dist/{name}."));
+            }
+        }
+    }
+    let attempt = Minifier::find(workspace).and_then(|minifier| {
+        let smaller = scripts.iter().map(|(name, source)| {
+            let folder = workspace.steps().join("minified").join(name);
+            Ok((name.clone(), minifier.minify(source, &folder)?))
+        });
+        smaller.collect()
+    });
+    match attempt {
+        Ok(smaller) => Ok((smaller, Optimisation::Done)),
+        Err(sentence) => {
+            println!("{sentence} The build goes on without: the scripts are not minified.");
+            Ok((scripts, Optimisation::LeftOut(sentence)))
+        }
+    }
 }
 
 /// The optimised module; without an optimiser the given one, after saying how much larger that is.

@@ -63,11 +63,30 @@ fn generate(raw: Vec<u8>) -> Result<Glued, String> {
         .ts()
         .ok_or_else(|| complain(&"there are no declarations"))?
         .to_string();
+    let mut javascript = name_module(output.js())?;
+    let module = output.wasm_mut();
+    for (count, import) in module.imports.iter_mut().enumerate() {
+        if let Some(renamed) = with_short_import(&javascript, &import.name, count) {
+            javascript = renamed;
+            import.name = short_import(count);
+        }
+    }
     Ok(Glued {
-        javascript: name_module(output.js())?.into_bytes(),
+        javascript: javascript.into_bytes(),
         declarations: declarations.into_bytes(),
-        wasm: output.wasm_mut().emit_wasm(),
+        wasm: module.emit_wasm(),
     })
+}
+
+/// Bindgen ends the name of an import with a hash, random digits that both files carry and no compression shortens.
+fn with_short_import(javascript: &str, name: &str, count: usize) -> Option<String> {
+    let key = format!("{name}: ");
+    (javascript.matches(&key).count() == 1)
+        .then(|| javascript.replace(&key, &format!("{}: ", short_import(count))))
+}
+
+fn short_import(count: usize) -> String {
+    format!("i{count}")
 }
 
 /// Bindgen expects its module under a name with `_bg`; pages are easier to read with one plain name.
@@ -99,6 +118,17 @@ mod tests {
         let tool = include_str!("../Cargo.toml");
         assert_eq!(locked(library, "wasm-bindgen"), Some(VERSION));
         assert_eq!(locked(tool, "wasm-bindgen-cli-support"), Some(VERSION));
+    }
+
+    #[test]
+    fn only_an_import_found_once_is_renamed() {
+        let glue = "__wbg_fill_0a1b: function() {},\n__wbg_fill_0a1b2: function() {}";
+        let renamed = with_short_import(glue, "__wbg_fill_0a1b", 7).unwrap();
+        assert_eq!(
+            renamed,
+            "i7: function() {},\n__wbg_fill_0a1b2: function() {}"
+        );
+        assert_eq!(with_short_import(glue, "__wbg_stroke_3c4d", 8), None);
     }
 
     #[test]

@@ -11,6 +11,7 @@ mod counts;
 mod freshness;
 mod html;
 mod inline;
+mod minify;
 mod modules;
 mod npm;
 mod optimise;

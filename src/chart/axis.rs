@@ -1,8 +1,8 @@
 //! Date and value scales: where ticks fall and which of their labels fit.
 
+use super::ink::Failed;
 use super::pen::{Align, Face, Pen};
 use super::theme::Colour;
-use crate::error::Error;
 use crate::explain::{DateForm, Figures};
 use crate::time::Utc;
 
@@ -143,7 +143,7 @@ impl DateAxis {
 
     /// Draws the finest ticks whose labels have room: a hairline between `top` and `bottom` for each, the labels
     /// below, years in a second line where they begin.
-    pub(super) fn draw(&self, pen: &mut Pen<'_>, scale: &Scale, face: Face) -> Result<(), Error> {
+    pub(super) fn draw(&self, pen: &mut Pen<'_>, scale: &Scale, face: Face) -> Result<(), Failed> {
         let choices: [(&[Tick], &[i32]); 3] = [
             (&self.days, &[1, 2, 5, 10]),
             (&self.months, &[1, 2, 3, 6]),
@@ -175,7 +175,7 @@ impl DateAxis {
         pen: &mut Pen<'_>,
         scale: &Scale,
         face: Face,
-    ) -> Result<(), Error> {
+    ) -> Result<(), Failed> {
         let mut year_before: Option<&str> = None;
         let mut years = Vec::new();
         for tick in ticks {

@@ -1,9 +1,9 @@
 //! The grip of the chosen date: a pill with the date in it, large enough for a finger.
 
+use super::ink::Failed;
 use super::pen::{Align, Pen, bold};
 use super::shapes::pill;
 use super::theme::Theme;
-use crate::error::Error;
 
 /// Height of the grip in CSS pixels; at least 24 for touch (WCAG 2.2, 2.5.8).
 pub(super) const HEIGHT: f64 = 26.0;
@@ -16,7 +16,7 @@ pub(super) fn draw(
     width: f64,
     date: &str,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let face = bold(13.0, theme.on_chosen);
     let half = pen.text_width(date, face)? / 2.0 + 24.0;
     let middle = x.clamp(

@@ -55,21 +55,29 @@ pub(super) struct TextLook {
     pub(super) colour: Colour,
 }
 
+/// The surface refused a mark. Empty, so that the test after every stroke costs next to nothing.
+#[derive(Debug, Clone, Copy)]
+pub(super) struct Failed;
+
+impl From<Failed> for Error {
+    fn from(_: Failed) -> Self {
+        Self::new(
+            Code::Drawing,
+            "The drawing surface refused a mark; give it a size of at least one pixel.",
+        )
+    }
+}
+
 /// A surface that takes marks.
 pub(super) trait Ink {
     /// Puts one mark on the surface.
-    fn put(&self, mark: Mark<'_>) -> Result<(), Error>;
+    fn put(&self, mark: Mark<'_>) -> Result<(), Failed>;
 }
 
 impl<DB: DrawingBackend> Ink for DrawingArea<DB, Shift> {
-    fn put(&self, mark: Mark<'_>) -> Result<(), Error> {
+    fn put(&self, mark: Mark<'_>) -> Result<(), Failed> {
         // The surface's own words would not help a reader, and formatting them costs bytes.
-        self.draw(&mark).map_err(|_| {
-            Error::new(
-                Code::Drawing,
-                "The drawing surface refused a mark; give it a size of at least one pixel.",
-            )
-        })
+        self.draw(&mark).map_err(|_| Failed)
     }
 }
 

@@ -107,9 +107,10 @@ impl Picture {
             theme.background,
         )?;
         match self {
-            Picture::Tradeoff(model) => tradeoff::draw(model, &mut pen, view, theme),
-            Picture::Disc(model) => disc::draw(model, &mut pen, view, theme),
+            Picture::Tradeoff(model) => tradeoff::draw(model, &mut pen, view, theme)?,
+            Picture::Disc(model) => disc::draw(model, &mut pen, view, theme)?,
         }
+        Ok(())
     }
 
     /// The instant at a horizontal position, held within the span; `None` for a picture without a span.

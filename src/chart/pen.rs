@@ -2,9 +2,8 @@
 
 use super::Viewport;
 pub(super) use super::ink::Align;
-use super::ink::{Ink, Mark, TextLook, Weight};
+use super::ink::{Failed, Ink, Mark, TextLook, Weight};
 use super::theme::Colour;
-use crate::error::Error;
 use plotters_backend::BackendCoord;
 use std::cell::Cell;
 
@@ -81,12 +80,12 @@ impl<'a> Pen<'a> {
         ((css * self.scale / self.grain).round() * self.grain) as i32
     }
 
-    pub(super) fn area(&self, points: &[Point], colour: Colour) -> Result<(), Error> {
+    pub(super) fn area(&self, points: &[Point], colour: Colour) -> Result<(), Failed> {
         let points: Vec<BackendCoord> = points.iter().map(|&point| self.at(point)).collect();
         self.ink.put(Mark::Area(&points, colour))
     }
 
-    pub(super) fn line(&self, points: &[Point], width: f64, colour: Colour) -> Result<(), Error> {
+    pub(super) fn line(&self, points: &[Point], width: f64, colour: Colour) -> Result<(), Failed> {
         let points: Vec<BackendCoord> = points.iter().map(|&point| self.at(point)).collect();
         self.ink
             .put(Mark::Line(&points, colour, self.stroke(width)))
@@ -98,7 +97,7 @@ impl<'a> Pen<'a> {
         (x0, y0): Point,
         (x1, y1): Point,
         colour: Colour,
-    ) -> Result<(), Error> {
+    ) -> Result<(), Failed> {
         let (left, top, right, bottom) = (
             self.snapped(x0),
             self.snapped(y0),
@@ -112,7 +111,7 @@ impl<'a> Pen<'a> {
     }
 
     /// A horizontal line of one device pixel.
-    pub(super) fn level(&self, x0: f64, x1: f64, y: f64, colour: Colour) -> Result<(), Error> {
+    pub(super) fn level(&self, x0: f64, x1: f64, y: f64, colour: Colour) -> Result<(), Failed> {
         let top = self.snapped(y);
         let (left, right, bottom) = (self.snapped(x0), self.snapped(x1), top + self.grain as i32);
         self.ink.put(Mark::Area(
@@ -129,7 +128,7 @@ impl<'a> Pen<'a> {
         y1: f64,
         width: f64,
         colour: Colour,
-    ) -> Result<(), Error> {
+    ) -> Result<(), Failed> {
         let broad = ((width * self.scale / self.grain).round().max(1.0) * self.grain) as i32;
         let left = self.snapped(x - f64::from(broad) / self.scale / 2.0);
         let (top, right, bottom) = (self.snapped(y0), left + broad, self.snapped(y1));
@@ -139,7 +138,7 @@ impl<'a> Pen<'a> {
         ))
     }
 
-    pub(super) fn disc(&self, centre: Point, radius: f64, colour: Colour) -> Result<(), Error> {
+    pub(super) fn disc(&self, centre: Point, radius: f64, colour: Colour) -> Result<(), Failed> {
         self.ink
             .put(Mark::Disc(self.at(centre), self.radius(radius), colour))
     }
@@ -150,7 +149,7 @@ impl<'a> Pen<'a> {
         radius: f64,
         width: f64,
         colour: Colour,
-    ) -> Result<(), Error> {
+    ) -> Result<(), Failed> {
         self.ink.put(Mark::Ring(
             self.at(centre),
             self.radius(radius),
@@ -164,7 +163,7 @@ impl<'a> Pen<'a> {
     }
 
     /// Width of a text in CSS pixels.
-    pub(super) fn text_width(&self, text: &str, face: Face) -> Result<f64, Error> {
+    pub(super) fn text_width(&self, text: &str, face: Face) -> Result<f64, Failed> {
         let width = Cell::new(0);
         self.ink
             .put(Mark::Measure(text, self.look(face, Align::Left), &width))?;
@@ -172,7 +171,7 @@ impl<'a> Pen<'a> {
     }
 
     /// The face, shrunk so that the text is no wider than `room`, but never below a readable size.
-    pub(super) fn fit(&self, text: &str, face: Face, room: f64) -> Result<Face, Error> {
+    pub(super) fn fit(&self, text: &str, face: Face, room: f64) -> Result<Face, Failed> {
         let width = self.text_width(text, face)?;
         if width <= room {
             return Ok(face);
@@ -189,7 +188,7 @@ impl<'a> Pen<'a> {
         at: Point,
         align: Align,
         face: Face,
-    ) -> Result<bool, Error> {
+    ) -> Result<bool, Failed> {
         if text.is_empty() {
             return Ok(false);
         }

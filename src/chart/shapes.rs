@@ -1,6 +1,7 @@
 //! Outlines: lit part of a disc, half rings, rounded handles. Plain geometry in the picture's plane.
 
 use super::pen::Point;
+use crate::quantity::{cos, sin};
 use std::f64::consts::{FRAC_PI_2, PI, TAU};
 
 /// Points on half an outline; 24 keep a disc of 300 px within a quarter of a pixel.
@@ -10,7 +11,7 @@ const HALF_STEPS: usize = 24;
 /// angle that points up. East of north is to the left, as seen looking out at the sky.
 pub(super) fn direction(position_angle_deg: f64, up_deg: f64) -> Point {
     let angle = (position_angle_deg - up_deg).to_radians();
-    (-angle.sin(), -angle.cos())
+    (-sin(angle), -cos(angle))
 }
 
 /// Outline of the lit part of a unit disc whose middle of the lit limb lies towards `towards`.
@@ -21,10 +22,10 @@ pub(super) fn lit_part(lit_fraction: f64, towards: Point) -> Vec<Point> {
     let (ux, uy) = towards;
     let place = |along: f64, across: f64| (along * ux - across * uy, along * uy + across * ux);
     let angle = |step: usize| -FRAC_PI_2 + PI * step as f64 / HALF_STEPS as f64;
-    let limb = (0..=HALF_STEPS).map(|step| place(angle(step).cos(), angle(step).sin()));
+    let limb = (0..=HALF_STEPS).map(|step| place(cos(angle(step)), sin(angle(step))));
     let terminator = (1..HALF_STEPS)
         .rev()
-        .map(|step| place(bulge * angle(step).cos(), angle(step).sin()));
+        .map(|step| place(bulge * cos(angle(step)), sin(angle(step))));
     limb.chain(terminator).collect()
 }
 
@@ -33,7 +34,7 @@ pub(super) fn circle() -> Vec<Point> {
     let steps = 2 * HALF_STEPS;
     (0..steps)
         .map(|step| TAU * step as f64 / steps as f64)
-        .map(|angle| (angle.cos(), angle.sin()))
+        .map(|angle| (cos(angle), sin(angle)))
         .collect()
 }
 
@@ -55,11 +56,11 @@ pub(super) fn half_ring(
 ) -> Vec<Point> {
     // Seen from the north the near half lies on the side away from the pole.
     let depth = match half {
-        RingHalf::Far => opening_deg.to_radians().sin(),
-        RingHalf::Near => -opening_deg.to_radians().sin(),
+        RingHalf::Far => sin(opening_deg.to_radians()),
+        RingHalf::Near => -sin(opening_deg.to_radians()),
     };
     let place = |radius: f64, angle: f64| {
-        let (along, across) = (radius * depth * angle.sin(), radius * angle.cos());
+        let (along, across) = (radius * depth * sin(angle), radius * cos(angle));
         (
             along * pole.0 - across * pole.1,
             along * pole.1 + across * pole.0,
@@ -96,14 +97,14 @@ pub(super) fn pill((x0, y0): Point, (x1, y1): Point) -> Vec<Point> {
     let angle = |step: usize| PI * step as f64 / steps as f64;
     let right = (0..=steps).map(|s| {
         (
-            x1 - radius + radius * angle(s).sin(),
-            middle - radius * angle(s).cos(),
+            x1 - radius + radius * sin(angle(s)),
+            middle - radius * cos(angle(s)),
         )
     });
     let left = (0..=steps).map(|s| {
         (
-            x0 + radius - radius * angle(s).sin(),
-            middle + radius * angle(s).cos(),
+            x0 + radius - radius * sin(angle(s)),
+            middle + radius * cos(angle(s)),
         )
     });
     right.chain(left).collect()

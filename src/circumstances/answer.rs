@@ -70,8 +70,8 @@ pub struct Circumstances {
     /// Saturn only: latitude of the Earth above the ring plane, north positive.
     #[serde(skip_serializing_if = "Option::is_none")]
     pub ring_opening_deg: Option<f64>,
-    /// What a place adds; its keys stand beside the others and are absent without a place.
-    #[serde(flatten)]
+    /// What a place adds; the module puts its keys beside the others.
+    #[serde(skip)]
     pub local: Option<Local>,
     /// Remarks that limit the answer.
     pub warnings: Vec<Warning>,

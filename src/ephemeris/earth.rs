@@ -2,7 +2,7 @@
 
 use super::light::aberrated;
 use crate::frames::mean_ecliptic_of_date;
-use crate::quantity::{AU_KM, add_scaled, scaled, unit};
+use crate::quantity::{AU_KM, add_scaled, scaled, sin_cos, unit};
 use crate::series::{SeriesBody, heliocentric, moon_of_date};
 use crate::time::Tt;
 
@@ -66,8 +66,8 @@ impl Earth {
 /// Geometric geocentric position of the Moon, ICRS axes.
 pub(super) fn moon_geocentric_au(tt: Tt) -> [f64; 3] {
     let moon = moon_of_date(tt);
-    let (sin_longitude, cos_longitude) = moon.longitude_rad.sin_cos();
-    let (sin_latitude, cos_latitude) = moon.latitude_rad.sin_cos();
+    let (sin_longitude, cos_longitude) = sin_cos(moon.longitude_rad);
+    let (sin_latitude, cos_latitude) = sin_cos(moon.latitude_rad);
     let direction = [
         cos_latitude * cos_longitude,
         cos_latitude * sin_longitude,

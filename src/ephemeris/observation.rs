@@ -4,8 +4,8 @@ use super::earth::{Earth, moon_geocentric_au};
 use super::light::{aberrated, bent};
 use crate::body::Body;
 use crate::quantity::{
-    KM_S_PER_AU_DAY, LIGHT_DAYS_PER_AU, SECONDS_PER_DAY, add_scaled, angle_between_rad, dot, norm,
-    scaled, unit,
+    KM_S_PER_AU_DAY, LIGHT_DAYS_PER_AU, SECONDS_PER_DAY, add_scaled, angle_between_rad,
+    angle_of_sine_rad, dot, norm, scaled, unit,
 };
 use crate::series::{SeriesBody, heliocentric};
 
@@ -163,12 +163,8 @@ impl Observation {
 
     /// Latitudes above a body's equator at which the Earth and the Sun stand, for a north pole on ICRS axes.
     pub(crate) fn earth_and_sun_latitude_deg(&self, pole: [f64; 3]) -> (f64, f64) {
-        let latitude_deg = |to_body: [f64; 3]| {
-            (-dot(pole, unit(to_body)))
-                .clamp(-1.0, 1.0)
-                .asin()
-                .to_degrees()
-        };
+        let latitude_deg =
+            |to_body: [f64; 3]| angle_of_sine_rad(-dot(pole, unit(to_body))).to_degrees();
         (
             latitude_deg(self.from_earth_au),
             latitude_deg(self.from_sun_au),

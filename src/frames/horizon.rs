@@ -1,6 +1,6 @@
 //! From the equator of date to an observer's horizon.
 
-use crate::quantity::wrap_degrees;
+use crate::quantity::{hypotenuse, sin_cos, wrap_degrees};
 
 /// A direction seen from a place.
 #[derive(Debug, Clone, Copy, PartialEq)]
@@ -20,8 +20,8 @@ pub(crate) fn horizontal(
     local_sidereal_time_rad: f64,
     latitude_rad: f64,
 ) -> Horizontal {
-    let (sin_time, cos_time) = local_sidereal_time_rad.sin_cos();
-    let (sin_latitude, cos_latitude) = latitude_rad.sin_cos();
+    let (sin_time, cos_time) = sin_cos(local_sidereal_time_rad);
+    let (sin_latitude, cos_latitude) = sin_cos(latitude_rad);
     let [x, y, z] = direction_of_date;
     // Axes of the meridian: towards it along the equator, and west of it.
     let toward_meridian = x * cos_time + y * sin_time;
@@ -34,7 +34,7 @@ pub(crate) fn horizontal(
     let parallactic_rad = (cos_latitude * west)
         .atan2(sin_latitude * equatorial_square - cos_latitude * z * toward_meridian);
     Horizontal {
-        altitude_deg: up.atan2(north.hypot(west)).to_degrees(),
+        altitude_deg: up.atan2(hypotenuse(north, west)).to_degrees(),
         azimuth_deg: wrap_degrees((-west).atan2(north).to_degrees()),
         parallactic_angle_deg: parallactic_rad.to_degrees(),
     }

@@ -1,5 +1,7 @@
 //! Rotation of the axes of a Cartesian system.
 
+use crate::quantity::sin_cos;
+
 /// Turns the coordinates of a vector from one set of axes into those of another.
 #[derive(Debug, Clone, Copy, PartialEq)]
 pub struct Matrix {
@@ -9,7 +11,7 @@ pub struct Matrix {
 impl Matrix {
     /// The axes turned about the x axis by an angle, counter-clockwise seen from its tip.
     pub(crate) fn about_x(angle_rad: f64) -> Self {
-        let (sin, cos) = angle_rad.sin_cos();
+        let (sin, cos) = sin_cos(angle_rad);
         Self {
             rows: [[1.0, 0.0, 0.0], [0.0, cos, sin], [0.0, -sin, cos]],
         }
@@ -17,7 +19,7 @@ impl Matrix {
 
     /// The axes turned about the z axis by an angle, counter-clockwise seen from its tip.
     pub(crate) fn about_z(angle_rad: f64) -> Self {
-        let (sin, cos) = angle_rad.sin_cos();
+        let (sin, cos) = sin_cos(angle_rad);
         Self {
             rows: [[cos, sin, 0.0], [-sin, cos, 0.0], [0.0, 0.0, 1.0]],
         }

@@ -1,7 +1,7 @@
 //! Nutation IAU 2000B: how the Moon and the Sun make the Earth's axis nod.
 
 use super::nutation_table::LUNI_SOLAR;
-use crate::quantity::ARCSEC_PER_RAD;
+use crate::quantity::{ARCSEC_PER_RAD, sin_cos, wrap};
 use crate::time::Tt;
 
 /// Displacement of the true equinox and equator of date from the mean ones.
@@ -42,7 +42,7 @@ const TABLE_UNITS_PER_RAD: f64 = 1e7 * ARCSEC_PER_RAD;
 pub fn nutation(tt: Tt) -> Nutation {
     let centuries = tt.julian_centuries();
     let arguments_rad = ARGUMENTS_ARCSEC.map(|(at_j2000_arcsec, rate_arcsec)| {
-        ((at_j2000_arcsec + rate_arcsec * centuries) % 1_296_000.0) / ARCSEC_PER_RAD
+        wrap(at_j2000_arcsec + rate_arcsec * centuries, 1_296_000.0) / ARCSEC_PER_RAD
     });
     let (mut longitude, mut obliquity) = (0.0, 0.0);
     // Small terms first, so that their sum is not lost in the large ones.
@@ -53,7 +53,7 @@ pub fn nutation(tt: Tt) -> Nutation {
             .zip(arguments_rad)
             .map(|(&multiplier, rad)| f64::from(multiplier) * rad)
             .sum();
-        let (sin, cos) = argument_rad.sin_cos();
+        let (sin, cos) = sin_cos(argument_rad);
         let [psi_sin, psi_sin_t, psi_cos, eps_cos, eps_cos_t, eps_sin] =
             term.tenth_microarcsec.map(f64::from);
         longitude += (psi_sin + psi_sin_t * centuries) * sin + psi_cos * cos;

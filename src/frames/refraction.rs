@@ -2,16 +2,15 @@
 //!
 //! Real refraction at the horizon scatters by several arcminutes; these are means.
 
+use crate::quantity::sin_cos;
+
 /// Refraction at an apparent (lifted) altitude, degrees.
 ///
 /// G. G. Bennett 1982, Journal of Navigation 35, 255; good to 0.07 arcmin above the horizon. Below it the value at the
 /// horizon holds, and it is never negative.
 pub fn refraction_from_apparent_altitude_deg(apparent_altitude_deg: f64) -> f64 {
     let altitude_deg = apparent_altitude_deg.clamp(0.0, 90.0);
-    let arcmin = 1.0
-        / (altitude_deg + 7.31 / (altitude_deg + 4.4))
-            .to_radians()
-            .tan();
+    let arcmin = cotangent(altitude_deg + 7.31 / (altitude_deg + 4.4));
     arcmin.max(0.0) / 60.0
 }
 
@@ -26,13 +25,15 @@ const NO_LIFT_ALTITUDE_DEG: f64 = -5.0;
 /// -1 degree, where nothing is seen, it fades to zero at -5 degrees.
 pub fn refraction_from_true_altitude_deg(true_altitude_deg: f64) -> f64 {
     let altitude_deg = true_altitude_deg.clamp(LOWEST_TRUE_ALTITUDE_DEG, 90.0);
-    let arcmin = 1.02
-        / (altitude_deg + 10.3 / (altitude_deg + 5.11))
-            .to_radians()
-            .tan();
+    let arcmin = 1.02 * cotangent(altitude_deg + 10.3 / (altitude_deg + 5.11));
     let fade = (true_altitude_deg - NO_LIFT_ALTITUDE_DEG)
         / (LOWEST_TRUE_ALTITUDE_DEG - NO_LIFT_ALTITUDE_DEG);
     arcmin.max(0.0) / 60.0 * fade.clamp(0.0, 1.0)
+}
+
+fn cotangent(angle_deg: f64) -> f64 {
+    let (sin, cos) = sin_cos(angle_deg.to_radians());
+    cos / sin
 }
 
 #[cfg(test)]

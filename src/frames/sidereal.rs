@@ -3,15 +3,15 @@
 use std::f64::consts::TAU;
 
 use super::precession::OfDate;
-use crate::quantity::ARCSEC_PER_RAD;
+use crate::quantity::{ARCSEC_PER_RAD, cos, sin, wrap};
 use crate::time::{Tt, Ut1};
 
 /// Earth rotation angle, 0 to 2 pi (IAU 2000 resolution B1.8).
 pub fn earth_rotation_angle_rad(ut1: Ut1) -> f64 {
     let days = ut1.days_since_j2000();
     // The whole turns are left out first: they would cost digits.
-    let turns = days.rem_euclid(1.0) + 0.779_057_273_264_0 + 0.002_737_811_911_354_48 * days;
-    TAU * turns.rem_euclid(1.0)
+    let turns = wrap(days, 1.0) + 0.779_057_273_264_0 + 0.002_737_811_911_354_48 * days;
+    TAU * wrap(turns, 1.0)
 }
 
 /// Greenwich mean sidereal time, 0 to 2 pi, IAU 2006 (N. Capitaine et al. 2003, A&A 412, 567, with P03 precession).
@@ -29,7 +29,10 @@ pub fn greenwich_mean_sidereal_time_rad(ut1: Ut1, tt: Tt) -> f64 {
         .iter()
         .rev()
         .fold(0.0, |sum, coefficient| sum * centuries + coefficient);
-    (earth_rotation_angle_rad(ut1) + precession_arcsec / ARCSEC_PER_RAD).rem_euclid(TAU)
+    wrap(
+        earth_rotation_angle_rad(ut1) + precession_arcsec / ARCSEC_PER_RAD,
+        TAU,
+    )
 }
 
 /// Greenwich apparent sidereal time, 0 to 2 pi.
@@ -38,10 +41,13 @@ pub fn greenwich_mean_sidereal_time_rad(ut1: Ut1, tt: Tt) -> f64 {
 pub fn greenwich_apparent_sidereal_time_rad(ut1: Ut1, tt: Tt, of_date: &OfDate) -> f64 {
     let nutation = of_date.nutation();
     let complementary_arcsec =
-        0.002_640_96 * nutation.node_rad.sin() + 0.000_063_52 * (2.0 * nutation.node_rad).sin();
-    let equation_rad = nutation.longitude_rad * of_date.mean_obliquity_rad().cos()
+        0.002_640_96 * sin(nutation.node_rad) + 0.000_063_52 * sin(2.0 * nutation.node_rad);
+    let equation_rad = nutation.longitude_rad * cos(of_date.mean_obliquity_rad())
         + complementary_arcsec / ARCSEC_PER_RAD;
-    (greenwich_mean_sidereal_time_rad(ut1, tt) + equation_rad).rem_euclid(TAU)
+    wrap(
+        greenwich_mean_sidereal_time_rad(ut1, tt) + equation_rad,
+        TAU,
+    )
 }
 
 #[cfg(test)]

@@ -1,6 +1,6 @@
 //! Angles on the sphere.
 
-use crate::quantity::{angle_between_rad, cross, dot, wrap_degrees};
+use crate::quantity::{angle_between_rad, cross, dot, hypotenuse, sin_cos, wrap_degrees};
 
 /// Longitude and latitude of a direction on whatever axes it is given.
 #[derive(Debug, Clone, Copy, PartialEq)]
@@ -17,14 +17,14 @@ impl Spherical {
         let [x, y, z] = vector;
         Self {
             longitude_deg: wrap_degrees(y.atan2(x).to_degrees()),
-            latitude_deg: z.atan2(x.hypot(y)).to_degrees(),
+            latitude_deg: z.atan2(hypotenuse(x, y)).to_degrees(),
         }
     }
 
     /// The vector of length one in this direction.
     pub fn direction(self) -> [f64; 3] {
-        let (sin_longitude, cos_longitude) = self.longitude_deg.to_radians().sin_cos();
-        let (sin_latitude, cos_latitude) = self.latitude_deg.to_radians().sin_cos();
+        let (sin_longitude, cos_longitude) = sin_cos(self.longitude_deg.to_radians());
+        let (sin_latitude, cos_latitude) = sin_cos(self.latitude_deg.to_radians());
         [
             cos_latitude * cos_longitude,
             cos_latitude * sin_longitude,

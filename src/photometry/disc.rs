@@ -1,7 +1,7 @@
 //! Size of the disc, its lit part, and how bright that is per area.
 
 use crate::body::Body;
-use crate::quantity::{ARCSEC_PER_RAD, AU_KM};
+use crate::quantity::{ARCSEC_PER_RAD, AU_KM, angle_of_sine_rad, cos};
 
 /// Equatorial radius of a body.
 ///
@@ -24,7 +24,7 @@ pub const fn equatorial_radius_km(body: Body) -> f64 {
 /// Lit share of the disc, 0 to 1: half of one plus the cosine of the phase angle.
 pub fn illuminated_fraction(phase_angle_deg: f64) -> f64 {
     // The square of the cosine of the half angle keeps its digits near a new disc.
-    (0.5 * phase_angle_deg).to_radians().cos().powi(2)
+    cos((0.5 * phase_angle_deg).to_radians()).powi(2)
 }
 
 /// The disc of a body as seen from some distance.
@@ -39,7 +39,7 @@ impl Disc {
     pub fn of(body: Body, distance_au: f64) -> Self {
         let sine = equatorial_radius_km(body) / (distance_au * AU_KM);
         Self {
-            angular_diameter_arcsec: 2.0 * sine.asin() * ARCSEC_PER_RAD,
+            angular_diameter_arcsec: 2.0 * angle_of_sine_rad(sine) * ARCSEC_PER_RAD,
         }
     }
 

@@ -1,5 +1,7 @@
 //! What the air takes away.
 
+use crate::quantity::{power, sin};
+
 /// Magnitudes lost straight up on an average clear night at a low site; 0.15 on a mountain, 0.4 in haze.
 pub const DEFAULT_EXTINCTION_MAG_PER_AIRMASS: f64 = 0.25;
 
@@ -10,8 +12,7 @@ pub const DEFAULT_EXTINCTION_MAG_PER_AIRMASS: f64 = 0.25;
 pub fn airmass(apparent_altitude_deg: f64) -> Option<f64> {
     (0.0..=90.0).contains(&apparent_altitude_deg).then(|| {
         let altitude_deg = apparent_altitude_deg;
-        1.0 / (altitude_deg.to_radians().sin()
-            + 0.505_72 * (altitude_deg + 6.079_95).powf(-1.636_4))
+        1.0 / (sin(altitude_deg.to_radians()) + 0.505_72 * power(altitude_deg + 6.079_95, -1.636_4))
     })
 }
 

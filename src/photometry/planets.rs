@@ -5,6 +5,7 @@
 //! from them by some hundredths, Mercury and Venus near conjunction by up to a tenth.
 
 use super::{Illumination, Magnitude, polynomial};
+use crate::quantity::sin_cos;
 
 /// Mercury, eq. 2; observed at phase angles from 2 to 170 degrees.
 pub fn mercury(light: &Illumination) -> Magnitude {
@@ -72,8 +73,8 @@ pub fn uranus(
     observer_latitude_deg: f64,
 ) -> Magnitude {
     let graphic_deg = |centric_deg: f64| {
-        (centric_deg.to_radians().tan() / URANUS_AXIS_RATIO.powi(2))
-            .atan()
+        let (sin, cos) = sin_cos(centric_deg.to_radians());
+        sin.atan2(URANUS_AXIS_RATIO.powi(2) * cos)
             .abs()
             .to_degrees()
     };

@@ -2,6 +2,7 @@
 
 use super::{Illumination, Magnitude, polynomial};
 use crate::ephemeris::Observation;
+use crate::quantity::sin;
 
 /// North pole of the ring plane, unit vector on ICRS axes (as the authors of the law take it).
 pub const SATURN_NORTH_POLE: [f64; 3] = [0.085_478_83, 0.073_235_76, 0.993_644_75];
@@ -43,7 +44,7 @@ pub fn saturn(light: &Illumination, latitudes: &SaturnLatitudes) -> Magnitude {
     if i_deg > LARGEST_PHASE_WITH_RINGS_DEG {
         return Magnitude::Undefined;
     }
-    let sin_opening = latitudes.effective_deg().to_radians().sin();
+    let sin_opening = sin(latitudes.effective_deg().to_radians());
     let law =
         -8.914 - 1.825 * sin_opening + 0.026 * i_deg - 0.378 * sin_opening * (-2.25 * i_deg).exp();
     Magnitude::Observed(light.distance_magnitudes() + law)

@@ -1,6 +1,8 @@
 //! How a body leans over the horizon: the angle between the celestial pole and the zenith, seen low in the sky.
 
 use super::Place;
+use crate::quantity::{angle_of_sine_rad, cos, sin, sin_cos};
+use std::f64::consts::FRAC_PI_2;
 
 /// Side of the sky.
 #[derive(Debug, Clone, Copy, PartialEq, Eq)]
@@ -19,19 +21,19 @@ const LOW_ALTITUDE_DEG: f64 = 10.0;
 /// Where the body never crosses that altitude, at the nearest point of its daily path, which is on the meridian.
 /// Spherical triangle pole-zenith-body: `cos q = (sin phi - sin a sin delta) / (cos a cos delta)`.
 pub fn lean_deg(place: &Place, declination_deg: f64, side: SkySide) -> f64 {
-    let (sin_phi, cos_phi) = place.latitude_deg().to_radians().sin_cos();
-    let (sin_delta, cos_delta) = declination_deg.to_radians().sin_cos();
-    let (sin_a, _) = LOW_ALTITUDE_DEG.to_radians().sin_cos();
+    let (sin_phi, cos_phi) = sin_cos(place.latitude_deg().to_radians());
+    let (sin_delta, cos_delta) = sin_cos(declination_deg.to_radians());
+    let (sin_a, _) = sin_cos(LOW_ALTITUDE_DEG.to_radians());
     // Hour angle at which the altitude is reached; held on the meridian where it never is.
     let cos_hour = (sin_a - sin_phi * sin_delta) / (cos_phi * cos_delta).max(1e-9);
-    let hour = cos_hour.clamp(-1.0, 1.0).acos();
+    let hour = FRAC_PI_2 - angle_of_sine_rad(cos_hour.clamp(-1.0, 1.0));
     let hour = match side {
         SkySide::Rising => -hour,
         SkySide::Setting => hour,
     };
     // The two components of the direction to the zenith, along east and north on the sky.
-    let east = cos_phi * hour.sin();
-    let north = sin_phi * cos_delta - cos_phi * sin_delta * hour.cos();
+    let east = cos_phi * sin(hour);
+    let north = sin_phi * cos_delta - cos_phi * sin_delta * cos(hour);
     if east.abs() + north.abs() < 1e-12 {
         return 0.0;
     }

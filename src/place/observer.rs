@@ -3,7 +3,9 @@
 use crate::ephemeris::{Earth, Observation};
 use crate::error::{Code, Error};
 use crate::frames::{Horizontal, OfDate, greenwich_apparent_sidereal_time_rad, horizontal};
-use crate::quantity::{AU_KM, LIGHT_DAYS_PER_AU, add_scaled, scaled, unit, wrap_half_turn_degrees};
+use crate::quantity::{
+    AU_KM, LIGHT_DAYS_PER_AU, add_scaled, scaled, sin_cos, unit, wrap_half_turn_degrees,
+};
 use crate::time::Utc;
 
 /// A point on or near the Earth's surface: geodetic coordinates on the WGS84 ellipsoid.
@@ -72,7 +74,7 @@ impl Place {
         // WGS84: equatorial radius and flattening.
         const EQUATORIAL_KM: f64 = 6_378.137;
         const FLATTENING: f64 = 1.0 / 298.257_223_563;
-        let (sin, cos) = self.latitude_deg.to_radians().sin_cos();
+        let (sin, cos) = sin_cos(self.latitude_deg.to_radians());
         let polar_square = (1.0 - FLATTENING).powi(2);
         let curvature_km = EQUATORIAL_KM / (cos * cos + polar_square * sin * sin).sqrt();
         let height_km = self.height_m / 1000.0;
@@ -98,7 +100,7 @@ pub fn topocentric(
 ) -> Horizontal {
     let greenwich_rad = greenwich_apparent_sidereal_time_rad(utc.to_ut1(), earth.tt(), of_date);
     let local_rad = greenwich_rad + place.longitude_deg.to_radians();
-    let (sin_time, cos_time) = local_rad.sin_cos();
+    let (sin_time, cos_time) = sin_cos(local_rad);
     let (from_axis_km, from_equator_km) = place.distances_from_axis_and_equator_km();
     let observer_au = scaled(
         1.0 / AU_KM,

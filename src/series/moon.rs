@@ -3,6 +3,7 @@
 use super::packed::{ANGLES, Reader, Series};
 use super::planets::mean_longitudes;
 use super::sum::{Angle, sum};
+use crate::quantity::wrap;
 use crate::time::Tt;
 use std::sync::OnceLock;
 
@@ -88,7 +89,7 @@ pub fn moon_of_date(tt: Tt) -> MoonOfDate {
             .iter()
             .rev()
             .fold(0.0, |sum, coefficient| sum * centuries + coefficient);
-        angle.value_rad = (arcsec % ARCSEC_PER_TURN) * RADIANS_PER_ARCSEC;
+        angle.value_rad = wrap(arcsec, ARCSEC_PER_TURN) * RADIANS_PER_ARCSEC;
         angle.rate_rad_per_millennium = coefficients[1] * 10.0 * RADIANS_PER_ARCSEC;
     }
     planets.copy_from_slice(&mean_longitudes(tt));

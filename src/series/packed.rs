@@ -96,7 +96,7 @@ impl<'a> Reader<'a> {
     pub(super) fn series(&mut self, single_below: usize) -> Series {
         let mut series = Series::default();
         let steps_rad =
-            [(); COORDINATES].map(|()| (-f64::from(self.byte())).exp2() * RADIANS_PER_ARCSEC);
+            [(); COORDINATES].map(|()| 0.5_f64.powi(self.byte().into()) * RADIANS_PER_ARCSEC);
         for (polynomial, step_rad) in series.polynomials.iter_mut().zip(steps_rad) {
             let length = self.byte();
             *polynomial = (0..length).map(|_| self.signed() * step_rad).collect();

@@ -2,6 +2,7 @@
 
 use super::packed::{Reader, Series};
 use super::sum::{Angle, Coordinate, sum};
+use crate::quantity::sin_cos;
 use crate::time::Tt;
 use std::sync::OnceLock;
 
@@ -121,8 +122,8 @@ fn to_icrs(
     radius_au: f64,
     radius_au_per_day: f64,
 ) -> State {
-    let (sin_l, cos_l) = longitude.value_rad.sin_cos();
-    let (sin_b, cos_b) = latitude.value_rad.sin_cos();
+    let (sin_l, cos_l) = sin_cos(longitude.value_rad);
+    let (sin_b, cos_b) = sin_cos(latitude.value_rad);
     let along = radius_au * cos_b * longitude.rate_rad_per_millennium / DAYS_PER_MILLENNIUM;
     let up = radius_au * latitude.rate_rad_per_millennium / DAYS_PER_MILLENNIUM;
     let outward = radius_au_per_day * cos_b - up * sin_b;
@@ -142,6 +143,6 @@ fn to_icrs(
 
 /// From the plane of the series to the ICRS equator.
 fn tilt([x, y, z]: [f64; 3]) -> [f64; 3] {
-    let (sin, cos) = OBLIQUITY_J2000_RAD.sin_cos();
+    let (sin, cos) = sin_cos(OBLIQUITY_J2000_RAD);
     [x, y * cos - z * sin, y * sin + z * cos]
 }

@@ -1,6 +1,7 @@
 //! Sums a series: every argument's cosine and sine by complex products of few powers, not by calls.
 
 use super::packed::{ANGLES, COORDINATES, HIGHEST_MULTIPLE, POWERS, Series};
+use crate::quantity::sin_cos;
 use crate::time::Tt;
 
 /// Middle of the fit window, Julian millennia from J2000.0 (1950).
@@ -89,7 +90,7 @@ fn powers(series: &Series, angles: &[Angle]) -> [[Complex; HIGHEST_MULTIPLE + 1]
         if highest == 0 {
             continue;
         }
-        let (im, re) = angle.value_rad.sin_cos();
+        let (im, re) = sin_cos(angle.value_rad);
         let first = Complex { re, im };
         let mut turn = Complex::ONE;
         for power in powers.iter_mut().skip(1).take(highest) {

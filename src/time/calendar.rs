@@ -111,7 +111,7 @@ pub(super) fn civil(days_since_j2000: f64) -> Civil {
         month,
         day,
         hour: (minute_of_day / 60.0) as u8,
-        minute: (minute_of_day % 60.0) as u8,
+        minute: (minute_of_day as u32 % 60) as u8,
         second: seconds - minute_of_day * 60.0,
     }
 }

@@ -1,9 +1,9 @@
 //! The object in which the element class hands over its attributes.
 
-use js_sys::Reflect;
-use serde::Serialize;
+use js_sys::{Object, Reflect};
 use wasm_bindgen::JsValue;
 
+use super::plain;
 use crate::chart::Colour;
 use crate::error::Error;
 
@@ -39,7 +39,7 @@ fn get(object: &JsValue, key: &str) -> JsValue {
 }
 
 /// One attribute that could not be used.
-#[derive(Debug, Serialize)]
+#[derive(Debug)]
 pub(super) struct Problem {
     attribute: &'static str,
     code: &'static str,
@@ -53,5 +53,13 @@ impl Problem {
             code: error.code().as_str(),
             message: error.message().to_owned(),
         }
+    }
+
+    pub(super) fn write(&self) -> Object {
+        plain::texts(&[
+            ("attribute", self.attribute),
+            ("code", self.code),
+            ("message", &self.message),
+        ])
     }
 }

@@ -1,19 +1,20 @@
 //! One element: its settings, its chosen day, its picture and its words.
 
-use js_sys::Object;
-use serde::Serialize;
+use js_sys::{Array, Object};
 use wasm_bindgen::prelude::*;
 use web_sys::HtmlCanvasElement;
 
 use super::attributes::{Attributes, Problem};
 use super::canvas::paint;
 use super::host::{Day, Host, read_host};
-use super::module::{put, thrown, write, write_circumstances};
+use super::module::thrown;
+use super::plain::{self, put, text_list};
 use super::scene::Scene;
 use super::settings::{Settings, Spot, View, frame_around, read_date};
 use super::words::{self, iso_date};
 use crate::chart::Viewport;
 use crate::error::Error;
+use crate::explain::Table;
 use crate::place::{self, Coordinate, Place};
 
 /// How far the Page keys move, in days.
@@ -32,21 +33,6 @@ pub struct Exhibit {
     width_css: f64,
 }
 
-/// What a visitor typed was taken, or why not.
-#[derive(Serialize)]
-struct Taken {
-    changed: bool,
-    message: Option<String>,
-}
-
-/// What the visitor chose, to be given back when the element returns to the page.
-#[derive(Serialize)]
-struct Choices {
-    date: String,
-    #[serde(skip_serializing_if = "Option::is_none")]
-    place: Option<String>,
-}
-
 #[wasm_bindgen]
 impl Exhibit {
     /// An exhibit with the default settings.
@@ -58,7 +44,7 @@ impl Exhibit {
     }
 
     /// Reads all attributes anew; returns a list of `{ attribute, code, message }` of those that cannot be used.
-    pub fn configure(&mut self, attributes: JsValue) -> Result<JsValue, JsValue> {
+    pub fn configure(&mut self, attributes: JsValue) -> Result<Array, JsValue> {
         let (exhibit, problems) = Self::build(&Attributes::new(attributes)).map_err(thrown)?;
         let (horizon_up, width_css) = (self.horizon_up, self.width_css);
         *self = exhibit;
@@ -66,7 +52,7 @@ impl Exhibit {
         if horizon_up {
             self.turn_disc(true)?;
         }
-        write(&problems)
+        Ok(problems.iter().map(Problem::write).collect())
     }
 
     /// Draws on a canvas of the given size in CSS pixels; returns where the date axis begins and ends.
@@ -87,23 +73,21 @@ impl Exhibit {
 
     /// Everything about the body at the chosen moment.
     pub fn circumstances(&self) -> Result<JsValue, JsValue> {
-        write_circumstances(&self.scene.now)
+        plain::circumstances(&self.scene.now)
     }
 
     /// The chosen date and, where the visitor or the page gave one, the place.
-    pub fn choices(&self) -> Result<JsValue, JsValue> {
-        let place = match &self.settings.spot {
-            Spot::Exact(place) => Some(format!(
-                "{},{}",
-                place.latitude_deg(),
-                place.longitude_deg()
-            )),
-            _ => None,
-        };
-        write(&Choices {
-            date: iso_date(self.settings.day),
-            place,
-        })
+    pub fn choices(&self) -> Object {
+        let choices = plain::texts(&[("date", &iso_date(self.settings.day))]);
+        if let Spot::Exact(place) = &self.settings.spot {
+            let (latitude_deg, longitude_deg) = (place.latitude_deg(), place.longitude_deg());
+            put(
+                &choices,
+                "place",
+                &format!("{latitude_deg},{longitude_deg}").into(),
+            );
+        }
+        choices
     }
 
     /// Labels, colours and the like: what changes with the settings but not with the date.
@@ -112,31 +96,34 @@ impl Exhibit {
     }
 
     /// Words and slider positions for the chosen date.
-    pub fn state(&self) -> Result<JsValue, JsValue> {
-        write(&words::state(
+    pub fn state(&self) -> Object {
+        words::state(
             &self.settings,
             &self.host,
             &self.scene,
             self.frame,
             self.horizon_up,
-        ))
+        )
     }
 
     /// The picture's numbers: `{ caption, head, rows, marked }`, `marked` being the chosen row.
-    pub fn table(&self) -> Result<JsValue, JsValue> {
-        let table = self.scene.table(&self.host);
+    pub fn table(&self) -> Object {
+        let Table {
+            caption,
+            head,
+            rows,
+        } = self.scene.table(&self.host);
         let chosen = words::chosen_remark();
-        let marked = table
-            .rows
+        let marked = rows
             .iter()
             .position(|row| row.last().is_some_and(|remark| remark == chosen));
-        let object = write(&table)?;
-        put(
-            object.unchecked_ref(),
-            "marked",
-            &marked.map_or(JsValue::NULL, |row| (row as f64).into()),
-        );
-        Ok(object)
+        let object = plain::texts(&[("caption", &caption)]);
+        put(&object, "head", &text_list(&head));
+        let rows: Array = rows.iter().map(|row| text_list(row)).collect();
+        put(&object, "rows", &rows);
+        let marked = marked.map_or(JsValue::NULL, |row| JsValue::from_f64(row as f64));
+        put(&object, "marked", &marked);
+        object
     }
 
     /// Moves to the date under a pointer, `x_css` from the left edge of the canvas.
@@ -175,21 +162,15 @@ impl Exhibit {
     }
 
     /// Moves to a typed date; answers `{ changed, message }`.
-    pub fn choose_date(&mut self, date: &str) -> Result<JsValue, JsValue> {
+    pub fn choose_date(&mut self, date: &str) -> Result<Object, JsValue> {
         match read_date(date, &self.host) {
-            Ok(day) => write(&Taken {
-                changed: self.move_to(day)?,
-                message: None,
-            }),
-            Err(error) => write(&Taken {
-                changed: false,
-                message: Some(error.message().to_owned()),
-            }),
+            Ok(day) => Ok(taken(self.move_to(day)?)),
+            Err(error) => Ok(refused(&error)),
         }
     }
 
     /// Takes a typed place; answers `{ changed, message }`.
-    pub fn choose_place(&mut self, latitude: &str, longitude: &str) -> Result<JsValue, JsValue> {
+    pub fn choose_place(&mut self, latitude: &str, longitude: &str) -> Result<Object, JsValue> {
         let typed = || {
             let latitude_deg = place::parse_coordinate(latitude, Coordinate::Latitude)?;
             let longitude_deg = place::parse_coordinate(longitude, Coordinate::Longitude)?;
@@ -199,15 +180,9 @@ impl Exhibit {
             Ok(place) => {
                 self.settings.spot = Spot::Exact(place);
                 self.rebuild()?;
-                write(&Taken {
-                    changed: true,
-                    message: None,
-                })
+                Ok(taken(true))
             }
-            Err(error) => write(&Taken {
-                changed: false,
-                message: Some(error.message().to_owned()),
-            }),
+            Err(error) => Ok(refused(&error)),
         }
     }
 
@@ -274,4 +249,19 @@ impl Exhibit {
             .map_err(thrown)?;
         Ok(())
     }
+}
+
+/// What a visitor typed was taken.
+fn taken(changed: bool) -> Object {
+    let answer = Object::new();
+    put(&answer, "changed", &changed.into());
+    put(&answer, "message", &JsValue::NULL);
+    answer
+}
+
+/// What a visitor typed was not taken, and why.
+fn refused(error: &Error) -> Object {
+    let answer = plain::texts(&[("message", error.message())]);
+    put(&answer, "changed", &false.into());
+    answer
 }

@@ -1,11 +1,11 @@
 //! The module's functions: one plain object in, plain data out, errors with a `code`.
 
 use js_sys::{Array, Float64Array, Object, Reflect};
-use serde::Serialize;
 use wasm_bindgen::prelude::*;
 
+use super::plain::{self, put};
 use crate::error::{Code, Error};
-use crate::{Circumstances, Place, Utc};
+use crate::{Place, Utc};
 
 #[wasm_bindgen(typescript_custom_section)]
 const TYPES: &str = include_str!("types.d.ts");
@@ -39,7 +39,7 @@ pub fn circumstances(
             place.as_ref(),
         )
     };
-    write_circumstances(&answer().map_err(thrown)?)
+    plain::circumstances(&answer().map_err(thrown)?)
 }
 
 /// One body over a span of days; see `Series` in the declarations.
@@ -145,34 +145,9 @@ impl<'a> Query<'a> {
     }
 }
 
-/// Plain objects, and `null` where a value does not exist.
-pub(super) fn write(value: &impl Serialize) -> Result<JsValue, JsValue> {
-    let serializer = serde_wasm_bindgen::Serializer::new()
-        .serialize_maps_as_objects(true)
-        .serialize_missing_as_null(true);
-    value.serialize(&serializer).map_err(JsValue::from)
-}
-
-/// Circumstances with the keys of the place, where there is one, beside the others.
-pub(super) fn write_circumstances(now: &Circumstances) -> Result<JsValue, JsValue> {
-    let object = write(now)?;
-    if let Some(local) = &now.local {
-        Object::assign(
-            object.unchecked_ref::<Object>(),
-            write(local)?.unchecked_ref(),
-        );
-    }
-    Ok(object)
-}
-
 /// An `Error` whose `code` a program can test.
 pub(super) fn thrown(error: Error) -> JsValue {
     let thrown = js_sys::Error::new(error.message());
     put(&thrown, "code", &error.code().as_str().into());
     thrown.into()
-}
-
-pub(super) fn put(object: &Object, key: &str, value: &JsValue) {
-    // Setting a property of a plain object that we have just made cannot fail.
-    let _ = Reflect::set(object, &key.into(), value);
 }

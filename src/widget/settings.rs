@@ -69,54 +69,47 @@ const SPAN_DAYS: std::ops::RangeInclusive<i64> = 8..=3000;
 impl Settings {
     /// Reads all attributes; each that cannot be used is replaced by its default and reported.
     pub(super) fn read(attributes: &Attributes, host: &Host) -> (Self, Vec<Problem>) {
-        let mut problems = Vec::new();
-        let mut note = |attribute, error: Error| problems.push(Problem::new(attribute, &error));
-        let text = |name| attributes.text(name);
-        let body = pick(text("body"), Body::Venus, read_body, |error| {
-            note("body", error)
-        });
+        let mut reading = Reading {
+            attributes,
+            problems: Vec::new(),
+        };
+        let body = reading.pick("body", Body::Venus, read_body);
         let settings = Self {
             body,
-            view: pick(text("view"), View::Tradeoff, read_view, |error| {
-                note("view", error)
+            view: reading.pick("view", View::Tradeoff, read_view),
+            day: reading.pick("date", host.today(), |text| read_date(text, host)),
+            span_days: reading.pick("span", default_span_days(body), read_span),
+            spot: reading.pick("place", rough_spot(host.zone()), |text| {
+                read_spot(text, host.zone())
             }),
-            day: pick(
-                text("date"),
-                host.today(),
-                |text| read_date(text, host),
-                |error| note("date", error),
-            ),
-            span_days: pick(text("span"), default_span_days(body), read_span, |error| {
-                note("span", error)
-            }),
-            spot: pick(
-                text("place"),
-                rough_spot(host.zone()),
-                |text| read_spot(text, host.zone()),
-                |error| note("place", error),
-            ),
-            theme: read_theme(attributes, |error| note("theme", error)),
-            units: pick(text("units"), Units::Metric, read_units, |error| {
-                note("units", error)
-            }),
+            theme: read_theme(&mut reading),
+            units: reading.pick("units", Units::Metric, read_units),
         };
-        (settings, problems)
+        (settings, reading.problems)
     }
 }
 
-/// The value that a text gives, or the default where there is none or it cannot be used.
-fn pick<T>(
-    text: Option<String>,
-    default: T,
-    read: impl FnOnce(&str) -> Result<T, Error>,
-    note: impl FnOnce(Error),
-) -> T {
-    match text {
-        None => default,
-        Some(text) => read(&text).unwrap_or_else(|error| {
-            note(error);
+/// The attributes and what could not be used of them so far.
+struct Reading<'a> {
+    attributes: &'a Attributes,
+    problems: Vec<Problem>,
+}
+
+impl Reading<'_> {
+    /// The value that an attribute gives, or the default where there is none or it cannot be used.
+    fn pick<T>(
+        &mut self,
+        name: &'static str,
+        default: T,
+        read: impl FnOnce(&str) -> Result<T, Error>,
+    ) -> T {
+        let Some(text) = self.attributes.text(name) else {
+            return default;
+        };
+        read(&text).unwrap_or_else(|error| {
+            self.problems.push(Problem::new(name, &error));
             default
-        }),
+        })
     }
 }
 
@@ -238,26 +231,31 @@ fn read_spot(text: &str, zone: &str) -> Result<Spot, Error> {
     }
 }
 
-fn read_theme(attributes: &Attributes, note: impl FnOnce(Error)) -> Theme {
-    let automatic = || {
-        if attributes.prefers_dark() {
-            Theme::dark()
-        } else {
-            Theme::light()
-        }
+fn read_theme(reading: &mut Reading<'_>) -> Theme {
+    // Statics, so that choosing one copies an address and not sixteen colours.
+    static LIGHT: Theme = Theme::light();
+    static DARK: Theme = Theme::dark();
+    static NIGHT: Theme = Theme::night();
+    let attributes = reading.attributes;
+    let automatic = if attributes.prefers_dark() {
+        &DARK
+    } else {
+        &LIGHT
     };
-    let read = |text: &str| match text {
-        "light" => Ok(Theme::light()),
-        "dark" => Ok(Theme::dark()),
-        "night" => Ok(Theme::night()),
-        "auto" => Ok(automatic()),
+    let theme = reading.pick("theme", automatic, |text| match text {
+        "light" => Ok(&LIGHT),
+        "dark" => Ok(&DARK),
+        "night" => Ok(&NIGHT),
+        "auto" => Ok(automatic),
         _ => Err(not_among("theme", text, "light, dark, night, auto")),
-    };
-    let theme = pick(attributes.text("theme"), automatic(), read, note);
-    Theme {
-        background: attributes.colour("paper").unwrap_or(theme.background),
-        ink: attributes.colour("ink").unwrap_or(theme.ink),
-        chosen: attributes.colour("accent").unwrap_or(theme.chosen),
-        ..theme
+    });
+    let mut theme = theme.clone();
+    for (name, colour) in [
+        ("paper", &mut theme.background),
+        ("ink", &mut theme.ink),
+        ("accent", &mut theme.chosen),
+    ] {
+        *colour = attributes.colour(name).unwrap_or(*colour);
     }
+    theme
 }

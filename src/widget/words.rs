@@ -1,10 +1,10 @@
 //! The element's words: gathers facts, has them told, and hands finished strings to the page.
 
 use js_sys::Object;
-use serde::Serialize;
+use wasm_bindgen::JsValue;
 
 use super::host::{Day, Host};
-use super::module::put;
+use super::plain::{put, texts};
 use super::scene::{Scene, figures, night_edge};
 use super::settings::{Settings, Spot, View};
 use crate::chart::Colour;
@@ -75,23 +75,6 @@ pub(super) fn furniture(settings: &Settings, host: &Host) -> Object {
     furniture
 }
 
-/// What the page shows for the chosen date.
-#[derive(Serialize)]
-#[serde(rename_all = "camelCase")]
-pub(super) struct State {
-    date: String,
-    day: Day,
-    first_day: Day,
-    last_day: Day,
-    horizon_up: bool,
-    sentence: String,
-    place: String,
-    caution: String,
-    remarks: String,
-    announcement: String,
-    description: String,
-}
-
 /// Slider positions and everything that is told about the chosen date.
 pub(super) fn state(
     settings: &Settings,
@@ -99,7 +82,7 @@ pub(super) fn state(
     scene: &Scene,
     (first_day, last_day): (Day, Day),
     horizon_up: bool,
-) -> State {
+) -> Object {
     let body = settings.body;
     let figures = figures(host);
     let (sentence, picture) = match settings.view {
@@ -137,19 +120,24 @@ pub(super) fn state(
         .filter(|&elongation_deg| elongation_deg < CAUTION_ELONGATION_DEG)
         .map(|elongation_deg| English.caution(body, &figures.number(elongation_deg, 0)))
         .unwrap_or_default();
-    State {
-        date: iso_date(settings.day),
-        day: settings.day,
-        first_day,
-        last_day,
-        horizon_up,
-        description: format!("{picture}. {sentence}"),
-        sentence,
-        place: place.join(" "),
-        caution,
-        remarks,
-        announcement: announce(&scene.reading(), figures),
+    let state = texts(&[
+        ("date", &iso_date(settings.day)),
+        ("description", &format!("{picture}. {sentence}")),
+        ("sentence", &sentence),
+        ("place", &place.join(" ")),
+        ("caution", &caution),
+        ("remarks", &remarks),
+        ("announcement", &announce(&scene.reading(), figures)),
+    ]);
+    for (key, day) in [
+        ("day", settings.day),
+        ("firstDay", first_day),
+        ("lastDay", last_day),
+    ] {
+        put(&state, key, &JsValue::from_f64(day as f64));
     }
+    put(&state, "horizonUp", &horizon_up.into());
+    state
 }
 
 /// A calendar day as the date field of a page writes it.

@@ -12,11 +12,12 @@ pub use model::{DiscModel, DiscSample};
 
 use super::Viewport;
 use super::handle;
+use super::ink::Failed;
 use super::pen::{Align, Pen, Point, bold, plain};
 use super::shapes::{RingHalf, circle, flatten, half_ring, lit_part, placed, rising_limb};
 use super::theme::{Colour, Theme};
-use crate::error::Error;
 use crate::explain::MOON_WIDTH_ARCSEC;
+use crate::quantity::{hypotenuse, sin_cos};
 use layout::Layout;
 use model::Disc;
 
@@ -25,7 +26,7 @@ pub(super) fn draw(
     pen: &mut Pen<'_>,
     view: &Viewport,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let layout = Layout::new(view.width_css, view.height_css);
     let scale = layout.disc / model.largest_extent_arcsec;
     let x_of = |day: f64| model.span.x_of(day, layout.left, layout.right);
@@ -78,7 +79,7 @@ pub(super) fn draw(
     };
     let half = model.chosen.extent_arcsec() * scale / 2.0;
     let at = (
-        x.clamp(layout.left + half, layout.right - half),
+        x.min(layout.right - half).max(layout.left + half),
         layout.stage_y,
     );
     pen.disc(
@@ -107,7 +108,7 @@ fn moon_edge(
     scale: f64,
     width: f64,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let Some(label) = model.moon_edge else {
         return Ok(());
     };
@@ -142,7 +143,7 @@ const RINGS: [(f64, f64); 2] = [
 /// Polar over equatorial radius of Saturn: 54,364 km over 60,268 km.
 const SATURN_POLAR: f64 = 54_364.0 / 60_268.0;
 
-fn globe(disc: &Disc, pen: &mut Pen<'_>, at: Point, scale: f64, look: &Look) -> Result<(), Error> {
+fn globe(disc: &Disc, pen: &mut Pen<'_>, at: Point, scale: f64, look: &Look) -> Result<(), Failed> {
     let radius = disc.radius_arcsec * scale;
     let mut lit = lit_part(disc.lit_fraction, disc.towards_sun);
     let Some(ring) = disc.ring else {
@@ -163,8 +164,8 @@ fn globe(disc: &Disc, pen: &mut Pen<'_>, at: Point, scale: f64, look: &Look) -> 
         })
     };
     rings(pen, RingHalf::Far)?;
-    let (sin, cos) = ring.opening_deg.to_radians().sin_cos();
-    let apparent_polar = sin.hypot(SATURN_POLAR * cos);
+    let (sin, cos) = sin_cos(ring.opening_deg.to_radians());
+    let apparent_polar = hypotenuse(sin, SATURN_POLAR * cos);
     let mut outline = circle();
     flatten(&mut outline, ring.pole, apparent_polar);
     flatten(&mut lit, ring.pole, apparent_polar);
@@ -184,7 +185,7 @@ fn stage_readings(
     at: Point,
     half: f64,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let (left_room, right_room) = (
         at.0 - half - 14.0 - layout.left,
         layout.right - at.0 - half - 14.0,
@@ -212,7 +213,7 @@ fn footer(
     layout: &Layout,
     scale: f64,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let face = plain(11.0, theme.muted);
     let longest = (0.2 * (layout.right - layout.left)).clamp(48.0, 130.0);
     let y = layout.footer_y;

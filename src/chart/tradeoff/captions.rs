@@ -1,21 +1,21 @@
 //! Names of the marked highlights, in the lines above the curves.
 
+use super::super::ink::Failed;
 use super::super::pen::{Align, Face, Pen, Point, bold, plain};
 use super::super::theme::Theme;
 use super::curves::{AREA, LIGHT};
 use super::layout::{Layout, Strip};
 use super::model::TradeoffModel;
-use crate::error::Error;
 
 /// The sign of a greatest brightness.
-pub(super) fn diamond(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Error> {
+pub(super) fn diamond(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Failed> {
     let outline = |r: f64| [(x, y - r), (x + r, y), (x, y + r), (x - r, y)];
     pen.area(&outline(6.5), theme.panel)?;
     pen.area(&outline(5.0), theme.ink)
 }
 
 /// The sign of a greatest lit area.
-pub(super) fn square(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Error> {
+pub(super) fn square(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Failed> {
     pen.block((x - 4.5, y - 4.5), (x + 4.5, y + 4.5), theme.panel)?;
     pen.block((x - 3.5, y - 3.5), (x + 3.5, y + 3.5), theme.size)
 }
@@ -26,7 +26,7 @@ struct Caption<'a> {
     short: &'a str,
     /// Stands beside the label where there is room, else in the next line.
     addition: &'a str,
-    sign: fn(&mut Pen<'_>, Point, &Theme) -> Result<(), Error>,
+    sign: fn(&mut Pen<'_>, Point, &Theme) -> Result<(), Failed>,
 }
 
 pub(super) fn draw(
@@ -34,7 +34,7 @@ pub(super) fn draw(
     pen: &mut Pen<'_>,
     layout: &Layout,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let day = model.chosen.day;
     let x_of = |day: f64| model.span.x_of(day, layout.plot_left, layout.plot_right);
     let left = brighter(model, pen, layout, theme)?;
@@ -95,7 +95,7 @@ fn brighter(
     pen: &mut Pen<'_>,
     layout: &Layout,
     theme: &Theme,
-) -> Result<f64, Error> {
+) -> Result<f64, Failed> {
     let face = plain(11.0, theme.muted);
     let y = layout.strips[LIGHT].panel_top + 8.0;
     let width = pen.text_width(model.brighter, face)?;
@@ -126,7 +126,7 @@ fn put(
     strip: &Strip,
     (left, right): (f64, f64),
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     const SIGN: f64 = 14.0;
     const AIR: f64 = 10.0;
     let (face, quiet) = (bold(12.0, theme.ink), plain(12.0, theme.muted));
@@ -171,6 +171,6 @@ fn put(
 }
 
 /// Clears the ground of a caption, so that the line of the chosen date does not run through its letters.
-fn behind(pen: &mut Pen<'_>, (x, y): Point, width: f64, theme: &Theme) -> Result<(), Error> {
+fn behind(pen: &mut Pen<'_>, (x, y): Point, width: f64, theme: &Theme) -> Result<(), Failed> {
     pen.block((x - 2.0, y - 8.0), (x + width + 2.0, y + 8.0), theme.panel)
 }

@@ -1,12 +1,12 @@
 //! The curves of the four strips, their scales and their marked highlights.
 
+use super::super::ink::Failed;
 use super::super::pen::{Align, Pen, Point, plain};
 use super::super::theme::{Colour, Theme};
 use super::captions::{diamond, square};
 use super::layout::{Layout, Strip};
 use super::model::TradeoffModel;
 use super::scales::Curve;
-use crate::error::Error;
 
 /// Distance of the nodes of a curve in CSS pixels.
 const NODE_CSS: f64 = 3.0;
@@ -52,7 +52,7 @@ pub(super) fn draw(
     pen: &mut Pen<'_>,
     layout: &Layout,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let nodes = nodes(model, layout);
     for (index, (strip, curve)) in layout.strips.iter().zip(model.curves.iter()).enumerate() {
         let look = look(index, theme);
@@ -119,7 +119,7 @@ fn scale(
     strip: &Strip,
     curve: &Curve,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let face = plain(11.0, theme.muted);
     pen.level(
         layout.plot_left,
@@ -145,7 +145,7 @@ fn flat_tops(
     pen: &mut Pen<'_>,
     layout: &Layout,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let (strip, curve) = (&layout.strips[LIGHT], &model.curves[LIGHT]);
     for mark in &model.peaks {
         let x_of = |day: f64| model.span.x_of(day, layout.plot_left, layout.plot_right);
@@ -172,7 +172,7 @@ fn marks(
     pen: &mut Pen<'_>,
     layout: &Layout,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let x_of = |day: f64| model.span.x_of(day, layout.plot_left, layout.plot_right);
     for mark in &model.extents {
         let (strip, curve) = (&layout.strips[AREA], &model.curves[AREA]);

@@ -1,20 +1,20 @@
 //! Left of the strips, or above each where the picture is narrow: a small picture of the term, its name and reading,
 //! and the sign that leads to the next.
 
+use super::super::ink::Failed;
 use super::super::pen::{Align, Pen, Point, bold, plain};
 use super::super::shapes::{lit_part, placed};
 use super::super::theme::Theme;
 use super::layout::{Layout, Strip};
 use super::model::{Chosen, TradeoffModel};
 use super::scales::Curve;
-use crate::error::Error;
 
 pub(super) fn draw(
     model: &TradeoffModel,
     pen: &mut Pen<'_>,
     layout: &Layout,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     for (index, (strip, curve)) in layout.strips.iter().zip(model.curves.iter()).enumerate() {
         let (at, radius) = (strip.picture, strip.picture_radius);
         match index {
@@ -44,7 +44,7 @@ fn readings(
     strip: &Strip,
     curve: &Curve,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let (x, room) = (strip.text_left, strip.text_right - strip.text_left);
     let name = pen.fit(curve.name, plain(12.0, theme.muted), room)?;
     pen.text(curve.name, (x, strip.name_y), Align::Left, name)?;
@@ -75,7 +75,7 @@ fn phase(
     radius: f64,
     chosen: &Chosen,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     pen.disc(at, radius, theme.night_side)?;
     lit(pen, at, radius, chosen, theme)?;
     pen.ring(at, radius, 1.0, theme.limb)
@@ -88,7 +88,7 @@ fn size(
     radius: f64,
     chosen: &Chosen,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     pen.ring(at, radius, 1.0, theme.grid)?;
     let radius = radius * chosen.size_share.min(1.0);
     pen.disc(at, radius, theme.size_tint)?;
@@ -102,7 +102,7 @@ fn lit_area(
     radius: f64,
     chosen: &Chosen,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let radius = radius * chosen.size_share.min(1.0);
     pen.disc(at, radius, theme.panel)?;
     lit(pen, at, radius, chosen, theme)?;
@@ -115,7 +115,7 @@ fn lit(
     radius: f64,
     chosen: &Chosen,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     // A body of its own light has no phase: all of it shines.
     let fraction = if chosen.lit_fraction.is_finite() {
         chosen.lit_fraction
@@ -135,7 +135,7 @@ fn light(
     radius: f64,
     chosen: &Chosen,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     pen.ring(at, radius, 1.0, theme.grid)?;
     if !chosen.light_share.is_finite() {
         return Ok(());
@@ -147,7 +147,7 @@ fn light(
 
 const SIGN_HALF: f64 = 4.5;
 
-fn times(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Error> {
+fn times(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Failed> {
     let half = SIGN_HALF * 0.9;
     pen.line(
         &[(x - half, y - half), (x + half, y + half)],
@@ -161,7 +161,7 @@ fn times(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Error> {
     )
 }
 
-fn equals(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Error> {
+fn equals(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Failed> {
     for offset in [-2.5, 2.5] {
         pen.line(
             &[(x - SIGN_HALF, y + offset), (x + SIGN_HALF, y + offset)],
@@ -172,7 +172,7 @@ fn equals(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Error> 
     Ok(())
 }
 
-fn arrow(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Error> {
+fn arrow(pen: &mut Pen<'_>, (x, y): Point, theme: &Theme) -> Result<(), Failed> {
     let half = SIGN_HALF + 0.5;
     pen.line(&[(x, y - half), (x, y + half)], 1.75, theme.ink)?;
     pen.line(

@@ -14,9 +14,9 @@ pub use model::TradeoffModel;
 use super::Viewport;
 use super::axis::Scale;
 use super::handle;
+use super::ink::Failed;
 use super::pen::{Pen, plain};
 use super::theme::Theme;
-use crate::error::Error;
 use layout::Layout;
 
 pub(super) fn draw(
@@ -24,7 +24,7 @@ pub(super) fn draw(
     pen: &mut Pen<'_>,
     view: &Viewport,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let layout = Layout::new(view.width_css, view.height_css);
     let (left, right) = (layout.plot_left, layout.plot_right);
     for strip in &layout.strips {
@@ -62,7 +62,7 @@ fn chosen_line(
     pen: &mut Pen<'_>,
     layout: &Layout,
     theme: &Theme,
-) -> Result<(), Error> {
+) -> Result<(), Failed> {
     let x = model
         .span
         .x_of(model.chosen.day, layout.plot_left, layout.plot_right);

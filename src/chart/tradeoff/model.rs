@@ -4,6 +4,7 @@ use super::super::axis::{DateAxis, Span};
 use super::scales::{Curve, brightness, curve, from_zero, largest};
 use crate::circumstances::{Circumstances, Series};
 use crate::explain::{AreaScale, DateForm, Figures, GreatestExtent, Highlights, Peak, Reading};
+use crate::quantity::power;
 use crate::time::Utc;
 use std::f64::consts::FRAC_PI_4;
 
@@ -169,7 +170,7 @@ impl TradeoffModel {
             curve.remark = remark;
         }
         // Pogson: light = 10^(-0.4 magnitude).
-        let light_share = 10f64.powf(-0.4 * (reading.magnitude - self.brightest_magnitude));
+        let light_share = power(10.0, -0.4 * (reading.magnitude - self.brightest_magnitude));
         self.chosen = Chosen {
             lit_fraction: reading.illuminated_fraction,
             size_share: arcsec / self.largest_arcsec,

@@ -2,6 +2,10 @@
 //!
 //! Numbers are plain `f64`; the name of each says its unit. Vectors are `[f64; 3]` on the axes that the name says.
 
+mod trigonometry;
+
+pub(crate) use trigonometry::{cos, sin, sin_cos};
+
 /// Astronomical unit in kilometres (IAU 2012, resolution B2; exact).
 pub const AU_KM: f64 = 149_597_870.7;
 /// Speed of light in kilometres per second (exact).
@@ -21,13 +25,35 @@ pub const DAYS_PER_JULIAN_CENTURY: f64 = 36_525.0;
 
 /// The same direction in degrees from 0 up to, but not including, 360.
 pub fn wrap_degrees(angle_deg: f64) -> f64 {
-    let wrapped_deg = angle_deg.rem_euclid(360.0);
-    // A tiny negative angle rounds up to exactly 360.
-    if wrapped_deg >= 360.0 {
-        0.0
+    wrap(angle_deg, 360.0)
+}
+
+/// The remainder from 0 up to, but not including, `period`.
+///
+/// `rem_euclid` and `%` divide bit by bit and bring more code than all angles need; this loses one rounding.
+pub(crate) fn wrap(value: f64, period: f64) -> f64 {
+    let wrapped = value - period * (value / period).floor();
+    // Next to a multiple of the period the quotient may round across it.
+    if (0.0..period).contains(&wrapped) || wrapped.is_nan() {
+        wrapped
     } else {
-        wrapped_deg
+        0.0
     }
+}
+
+/// A positive base to any power, good to 14 digits; `powf` would bring a table of its own.
+pub(crate) fn power(base: f64, exponent: f64) -> f64 {
+    (exponent * std::f64::consts::LN_10 * base.log10()).exp()
+}
+
+/// Angle of a sine, -pi/2 to pi/2; a sine that rounding has put outside -1 to 1 is held there.
+pub(crate) fn angle_of_sine_rad(sine: f64) -> f64 {
+    sine.atan2((1.0 - sine * sine).max(0.0).sqrt())
+}
+
+/// Length of the hypotenuse, for lengths far from overflow.
+pub(crate) fn hypotenuse(a: f64, b: f64) -> f64 {
+    (a * a + b * b).sqrt()
 }
 
 /// The same direction in degrees from -180 up to, but not including, 180.
