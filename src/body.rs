@@ -1,6 +1,6 @@
 //! The bodies that the ephemeris knows.
 
-use crate::error::{Code, Error, quoted};
+use crate::error::{Code, Error, listed, quoted};
 use std::{fmt, str::FromStr};
 
 /// Sun, Moon and the planets except the Earth, by the names the module uses.
@@ -87,13 +87,12 @@ impl FromStr for Body {
             .into_iter()
             .find(|body| body.name().eq_ignore_ascii_case(wanted))
             .ok_or_else(|| {
-                let known: Vec<&str> = Body::ALL.iter().map(|body| body.name()).collect();
                 Error::new(
                     Code::UnknownBody,
                     format!(
                         "There is no body {} here; choose one of {}.",
                         quoted(wanted),
-                        known.join(", ")
+                        listed(Body::ALL.iter().map(|body| body.name()))
                     ),
                 )
             })

@@ -75,6 +75,18 @@ impl fmt::Display for Error {
 
 impl std::error::Error for Error {}
 
+/// Names with commas between them.
+pub(crate) fn listed<'a>(names: impl Iterator<Item = &'a str>) -> String {
+    let mut list = String::new();
+    for name in names {
+        if !list.is_empty() {
+            list.push_str(", ");
+        }
+        list.push_str(name);
+    }
+    list
+}
+
 /// What was typed, in quotes, cut so that a pasted page does not become the message.
 pub(crate) fn quoted(text: &str) -> String {
     let mut shown: String = text.trim().chars().take(40).collect();

@@ -19,10 +19,10 @@ pub(super) fn draw(
 ) -> Result<(), Failed> {
     let face = bold(13.0, theme.on_chosen);
     let half = pen.text_width(date, face)? / 2.0 + 24.0;
-    let middle = x.clamp(
-        (half + 2.0).min(width / 2.0),
-        (width - half - 2.0).max(width / 2.0),
-    );
+    // Not `clamp`: its message for bounds in the wrong order brings the formatting of exponents.
+    let middle = x
+        .min((width - half - 2.0).max(width / 2.0))
+        .max((half + 2.0).min(width / 2.0));
     let y = top + HEIGHT / 2.0;
     pen.area(
         &pill((middle - half, top), (middle + half, top + HEIGHT)),

@@ -8,7 +8,7 @@ use super::attributes::{Attributes, Problem};
 use super::canvas::paint;
 use super::host::{Day, Host, read_host};
 use super::module::thrown;
-use super::plain::{self, put, text_list};
+use super::plain::{self, put};
 use super::scene::Scene;
 use super::settings::{Settings, Spot, View, frame_around, read_date};
 use super::words::{self, iso_date};
@@ -118,9 +118,8 @@ impl Exhibit {
             .iter()
             .position(|row| row.last().is_some_and(|remark| remark == chosen));
         let object = plain::texts(&[("caption", &caption)]);
-        put(&object, "head", &text_list(&head));
-        let rows: Array = rows.iter().map(|row| text_list(row)).collect();
-        put(&object, "rows", &rows);
+        put(&object, "head", &plain::list(&head));
+        put(&object, "rows", &plain::list(&rows));
         let marked = marked.map_or(JsValue::NULL, |row| JsValue::from_f64(row as f64));
         put(&object, "marked", &marked);
         object

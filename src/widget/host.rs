@@ -2,7 +2,8 @@
 
 use std::cell::RefCell;
 
-use js_sys::{Array, Date, Function, Intl, Object, Reflect};
+use js_sys::{Date, Function, Intl, Object, Reflect};
+use wasm_bindgen::prelude::wasm_bindgen;
 use wasm_bindgen::{JsCast, JsValue};
 
 use super::attributes::{Attributes, Problem};
@@ -13,6 +14,15 @@ use crate::time::Utc;
 const MILLISECONDS_PER_DAY: f64 = 86_400_000.0;
 /// 2000-01-01T12:00 UTC in the browser's count of milliseconds since 1970.
 const J2000_UNIX_MILLISECONDS: f64 = 946_728_000_000.0;
+
+// The binding's own constructors do not catch the RangeError for a zone or tag that the browser does not know.
+#[wasm_bindgen]
+extern "C" {
+    #[wasm_bindgen(catch, js_namespace = Intl, js_name = DateTimeFormat)]
+    fn date_time_format(lang: &str, options: &Object) -> Result<JsValue, JsValue>;
+    #[wasm_bindgen(catch, js_namespace = Intl, js_name = NumberFormat)]
+    fn number_format(lang: &str, options: &Object) -> Result<JsValue, JsValue>;
+}
 
 /// Calendar day in the zone of a [`Host`], counted from 2000-01-01.
 pub(super) type Day = i64;
@@ -50,7 +60,7 @@ impl Host {
         ] {
             set(&options, key, &value.into());
         }
-        let fields = construct("DateTimeFormat", "en-u-ca-gregory", &options).map_err(|()| {
+        let fields = date_time_format("en-u-ca-gregory", &options).map_err(|_| {
             let message = format!(
                 "This browser knows no time zone \"{zone}\"; a zone is written like Europe/Prague."
             );
@@ -63,7 +73,7 @@ impl Host {
             dates: RefCell::default(),
             numbers: RefCell::default(),
         };
-        construct("NumberFormat", lang, &Object::new()).map_err(|()| {
+        number_format(lang, &Object::new()).map_err(|_| {
             Error::new(
                 Code::BadOption,
                 format!(
@@ -138,7 +148,7 @@ impl Host {
         let options = options(fields);
         set(&options, "timeZone", &self.zone.as_str().into());
         set(&options, "calendar", &"gregory".into());
-        let format: Intl::DateTimeFormat = construct("DateTimeFormat", &self.lang, &options)
+        let format: Intl::DateTimeFormat = date_time_format(&self.lang, &options)
             .ok()?
             .unchecked_into();
         Some(format.format())
@@ -149,25 +159,21 @@ impl Host {
         for key in ["minimumFractionDigits", "maximumFractionDigits"] {
             set(&options, key, &f64::from(decimals).into());
         }
-        let format: Intl::NumberFormat = construct("NumberFormat", &self.lang, &options)
-            .ok()?
-            .unchecked_into();
+        let format: Intl::NumberFormat = number_format(&self.lang, &options).ok()?.unchecked_into();
         Some(format.format())
     }
 }
 
 impl Formats for Host {
     fn number(&self, value: f64, decimals: u8) -> String {
-        let written = cached(&self.numbers, decimals, || self.number_format(decimals))
+        cached(&self.numbers, decimals, || self.number_format(decimals))
             .and_then(|format| {
                 format
                     .call1(&JsValue::NULL, &value.into())
                     .ok()?
                     .as_string()
             })
-            .unwrap_or_else(|| value.to_string());
-        // The browser writes a hyphen; a true minus sign lines up with the digits.
-        written.replace('-', "\u{2212}")
+            .unwrap_or_else(|| value.to_string())
     }
 
     fn date(&self, utc: Utc, form: DateForm) -> String {
@@ -238,7 +244,7 @@ fn cached<K: Copy + PartialEq>(
 
 /// The zone that the browser runs in; UTC where it does not say.
 pub(super) fn browser_zone() -> String {
-    construct("DateTimeFormat", "en", &Object::new())
+    date_time_format("en", &Object::new())
         .ok()
         .map(|format| {
             text(
@@ -250,15 +256,6 @@ pub(super) fn browser_zone() -> String {
         })
         .filter(|zone| !zone.is_empty())
         .unwrap_or_else(|| "UTC".to_owned())
-}
-
-/// `new Intl.<name>(lang, options)`, whose RangeError the binding's own constructor would not catch.
-fn construct(name: &str, lang: &str, options: &Object) -> Result<JsValue, ()> {
-    let constructor = Reflect::get(&js_sys::global(), &"Intl".into())
-        .and_then(|intl| Reflect::get(&intl, &name.into()))
-        .and_then(|constructor| constructor.dyn_into::<Function>())
-        .map_err(drop)?;
-    Reflect::construct(&constructor, &Array::of2(&lang.into(), options)).map_err(drop)
 }
 
 fn options(fields: &[(&str, &str)]) -> Object {

@@ -4,7 +4,7 @@ use js_sys::{Array, Float64Array, Object, Reflect};
 use wasm_bindgen::prelude::*;
 
 use super::plain::{self, put};
-use crate::error::{Code, Error};
+use crate::error::{Code, Error, listed};
 use crate::{Place, Utc};
 
 #[wasm_bindgen(typescript_custom_section)]
@@ -92,7 +92,7 @@ impl<'a> Query<'a> {
         let Some(object) = query.dyn_ref::<Object>() else {
             let message = format!(
                 "The function takes one object with the keys {}.",
-                keys.join(", ")
+                listed(keys.iter().copied())
             );
             return Err(Error::new(Code::BadOption, message));
         };
@@ -105,7 +105,7 @@ impl<'a> Query<'a> {
             Some(key) => {
                 let message = format!(
                     "There is no key \"{key}\" here; the keys are {}.",
-                    keys.join(", ")
+                    listed(keys.iter().copied())
                 );
                 Err(Error::new(Code::BadOption, message))
             }
@@ -139,7 +139,7 @@ impl<'a> Query<'a> {
             Code::BadOption,
             format!(
                 "{key} must be {wanted}; the keys are {}.",
-                self.keys.join(", ")
+                listed(self.keys.iter().copied())
             ),
         )
     }

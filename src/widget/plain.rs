@@ -1,6 +1,6 @@
 //! Plain JavaScript data: the public answers through serde, the element's own words key by key, which is smaller.
 
-use js_sys::{Array, Object, Reflect};
+use js_sys::{Object, Reflect};
 use serde::Serialize;
 use wasm_bindgen::{JsCast, JsValue};
 
@@ -20,9 +20,10 @@ pub(super) fn texts(pairs: &[(&str, &str)]) -> Object {
     object
 }
 
-/// An array of texts.
-pub(super) fn text_list(texts: &[String]) -> Array {
-    texts.iter().map(|text| JsValue::from_str(text)).collect()
+/// An array of texts, or of arrays of texts.
+pub(super) fn list(texts: &impl Serialize) -> JsValue {
+    // Texts in memory can always be written.
+    serde_wasm_bindgen::to_value(texts).unwrap_or(JsValue::NULL)
 }
 
 /// Plain data of the public answers: objects for structs, and `null` where a value does not exist.

@@ -95,25 +95,19 @@ pub(super) fn state(
             English.picture_disc(body),
         ),
     };
-    let mut place = vec![
-        distance(settings, host, scene),
-        outlook(settings, host, scene),
-    ];
+    let mut place = distance(settings, host, scene);
+    add_sentence(&mut place, &outlook(settings, host, scene));
     if horizon_up {
-        place.push(English.lean(body, night_edge(&scene.now)));
+        add_sentence(&mut place, &English.lean(body, night_edge(&scene.now)));
     }
     // What limits the picture itself is said with it; what only limits the last digit stands with the numbers.
-    let warnings = &scene.now.warnings;
-    let weighty = warnings
-        .iter()
-        .filter(|warning| WEIGHTY_WARNINGS.contains(&warning.code));
-    place.extend(weighty.map(|warning| warning.message.clone()));
     let mut remarks = String::new();
-    for warning in warnings {
-        remarks.push_str(&warning.message);
-        remarks.push(' ');
+    for warning in &scene.now.warnings {
+        if WEIGHTY_WARNINGS.contains(&warning.code) {
+            add_sentence(&mut place, &warning.message);
+        }
+        add_sentence(&mut remarks, &warning.message);
     }
-    place.retain(|line| !line.is_empty());
     let caution = scene
         .now
         .elongation_deg
@@ -124,7 +118,7 @@ pub(super) fn state(
         ("date", &iso_date(settings.day)),
         ("description", &format!("{picture}. {sentence}")),
         ("sentence", &sentence),
-        ("place", &place.join(" ")),
+        ("place", &place),
         ("caution", &caution),
         ("remarks", &remarks),
         ("announcement", &announce(&scene.reading(), figures)),
@@ -138,6 +132,13 @@ pub(super) fn state(
     }
     put(&state, "horizonUp", &horizon_up.into());
     state
+}
+
+fn add_sentence(text: &mut String, sentence: &str) {
+    if !text.is_empty() && !sentence.is_empty() {
+        text.push(' ');
+    }
+    text.push_str(sentence);
 }
 
 /// A calendar day as the date field of a page writes it.
