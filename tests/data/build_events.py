@@ -76,7 +76,7 @@ def of_the_moon():
 # Columns beside the names and the instant, with their decimals; none means two digits in all.
 COLUMNS = {
     "sun": [("elongation_deg", 5)],
-    "light": [("magnitude", 5), ("lit_area_arcsec2", 3), ("phase_angle_deg", 2), ("secondary", 0)],
+    "light": [("magnitude", 5), ("lit_area_arcsec2", 4), ("secondary", 0), ("stands_out_by", None)],
     "motion": [("ra_deg", 5), ("distance_au", 8), ("secondary", 0)],
     "planet_conjunctions": [("separation_deg", 5)],
     "planet_closest": [("separation_deg", 5)],

@@ -9,6 +9,8 @@ from events_search import brackets_of_minima, minima, minima_within, roots, wrap
 from events_sky import INNER, OUTER, PLANETS, Sky
 
 STEP_DAYS = 1.0
+# Some extrema hardly stand out from the slope beside them: light by millionths of a magnitude, separations by arcseconds.
+FINE_STEP_DAYS = 0.1
 # Half a synodic round of Mars and more: whole rounds are seen on either side of the span.
 MARGIN_DAYS = 420.0
 ORBIT_DAYS = {"mercury": 87.97, "venus": 224.70, "mars": 686.98, "jupiter": 4332.6, "saturn": 10759.2, "uranus": 30688.5, "neptune": 60182.0}
@@ -21,6 +23,8 @@ class Planets:
     def __init__(self, start, end):
         self.days = np.arange(start - MARGIN_DAYS, end + MARGIN_DAYS, STEP_DAYS)
         self.sky = Sky(self.days)
+        self.fine_days = np.arange(self.days[0], self.days[-1], FINE_STEP_DAYS)
+        self.fine_sky = Sky(self.fine_days)
         self.conjunctions = {name: self.meets_sun(name, 0) for name in PLANETS}
 
     def meets_sun(self, name, excess_deg):
@@ -37,7 +41,7 @@ class Planets:
             inferior = self.is_inferior(name)
             yield from with_elongation("inferior-conjunction", name, self.conjunctions[name][inferior])
             yield from with_elongation("superior-conjunction", name, self.conjunctions[name][~inferior])
-            found = minima(lambda t: -Sky(t).separation_deg(name, "sun"), self.days, -self.sky.separation_deg(name, "sun"))
+            found = minima(lambda t: -Sky(t).separation_deg(name, "sun"), self.fine_days, -self.fine_sky.separation_deg(name, "sun"))
             east = Sky(found).from_sun_longitude_deg(name) < 180
             yield from with_elongation("greatest-elongation-east", name, found[east])
             yield from with_elongation("greatest-elongation-west", name, found[~east])
@@ -49,22 +53,26 @@ class Planets:
                 yield from with_elongation(kind, name, self.meets_sun(name, excess))
 
     def by_light(self):
+        days, sky = self.fine_days, self.fine_sky
         for name in INNER:
-            found = minima(lambda t: -Sky(t).lit_area_arcsec2(name), self.days, -self.sky.lit_area_arcsec2(name))
-            sides = np.searchsorted(self.conjunctions[name], found)
-            yield from with_light("greatest-illuminated-extent", name, found, sides, -Sky(found).lit_area_arcsec2(name))
+            merits = -sky.lit_area_arcsec2(name)
+            found = minima(lambda t: -Sky(t).lit_area_arcsec2(name), days, merits)
+            parts = np.searchsorted(self.conjunctions[name], found)
+            yield from with_light("greatest-illuminated-extent", name, found, parts, -Sky(found).lit_area_arcsec2(name), days, merits)
         for name in PLANETS:
-            found = minima(lambda t: Sky(t).magnitude(name), self.days, self.sky.magnitude(name))
-            sky = Sky(found)
+            around, merits = (days, sky.magnitude(name)) if name in INNER else (self.days, self.sky.magnitude(name))
+            found = minima(lambda t: Sky(t).magnitude(name), around, merits)
+            there = Sky(found)
             if name in INNER:
-                found = found[sky.phase_angle_deg(name) < 160]
+                found = found[there.phase_angle_deg(name) < 160]
             else:
-                found = found[sky.separation_deg(name, "sun") > 120]
+                found = found[there.separation_deg(name, "sun") > 120]
             # Venus has a brightest moment on either side of inferior conjunction, the others have one a round.
-            parts = self.conjunctions[name]
+            ends = self.conjunctions[name]
             if name == "mercury":
-                parts = parts[self.is_inferior(name)]
-            yield from with_light("greatest-brightness", name, found, np.searchsorted(parts, found), Sky(found).magnitude(name))
+                ends = ends[self.is_inferior(name)]
+            parts = np.searchsorted(ends, found)
+            yield from with_light("greatest-brightness", name, found, parts, Sky(found).magnitude(name), around, merits)
 
     def by_motion(self):
         for name in PLANETS:
@@ -91,7 +99,8 @@ class Planets:
 
     def closest_of_pairs(self):
         for first, second in itertools.combinations(PLANETS, 2):
-            found = minima(lambda t: Sky(t).square_of_chord(first, second), self.days, self.sky.square_of_chord(first, second))
+            samples = self.fine_sky.square_of_chord(first, second)
+            found = minima(lambda t: Sky(t).square_of_chord(first, second), self.fine_days, samples)
             found = found[Sky(found).separation_deg(first, second) < CLOSE_DEG]
             yield from with_separation(first, second, found)
 
@@ -124,14 +133,23 @@ def with_elongation(kind, name, found):
         yield {"kind": kind, "body": name, "tt": tt, "elongation_deg": elongation}
 
 
-def with_light(kind, name, found, groups, merit):
-    """The least merit of each group is the event proper, the others are secondary."""
+def with_light(kind, name, found, groups, merit, days, merits):
+    """The least merit of each group is the event proper; the others are secondary and may hardly stand out."""
     sky = Sky(found)
-    columns = sky.magnitude(name), sky.lit_area_arcsec2(name), sky.phase_angle_deg(name)
-    for n, (tt, magnitude, area, phase) in enumerate(zip(found, *columns)):
-        beaten = np.any(merit[groups == groups[n]] < merit[n])
-        row = {"kind": kind, "body": name, "tt": tt, "magnitude": magnitude, "lit_area_arcsec2": area}
-        yield row | {"phase_angle_deg": phase, "secondary": int(beaten)}
+    for n, (tt, magnitude, area) in enumerate(zip(found, sky.magnitude(name), sky.lit_area_arcsec2(name))):
+        row = {"kind": kind, "body": name, "tt": tt, "magnitude": magnitude, "lit_area_arcsec2": area, "secondary": 0}
+        if np.any(merit[groups == groups[n]] < merit[n]):
+            after = np.searchsorted(days, tt)
+            sides = merits[after:], merits[after - 1 :: -1]
+            row |= {"secondary": 1, "stands_out_by": min(climb(merit[n], side) for side in sides)}
+        yield row
+
+
+def climb(bottom, side):
+    """How far one must climb from a minimum along the samples of one side before it goes below it."""
+    beyond = np.flatnonzero(side < bottom)
+    passed = side[: beyond[0]] if len(beyond) else side
+    return np.max(passed, initial=bottom) - bottom
 
 
 def with_separation(first, second, found):
