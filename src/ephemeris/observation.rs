@@ -1,6 +1,6 @@
 //! One body as its light shows it from the Earth's centre.
 
-use super::earth::{Earth, moon_geocentric_au};
+use super::earth::{Earth, moon_geocentric};
 use super::light::{aberrated, bent};
 use crate::body::Body;
 use crate::quantity::{
@@ -61,13 +61,10 @@ impl Observation {
     }
 
     fn moon(earth: &Earth) -> Self {
-        let light_days = LIGHT_DAYS_PER_AU * norm(earth.moon_au);
-        let from_earth_au = moon_geocentric_au(earth.tt.plus_days(-light_days));
-        // Over 1.3 seconds the path is straight to a few millimetres; the count of days keeps the speed to 2e-6.
-        let velocity = scaled(
-            1.0 / light_days,
-            add_scaled(earth.moon_au, -1.0, from_earth_au),
-        );
+        // Over the 1.3 seconds of the light's way the path is straight to a few millimetres.
+        let (now_au, velocity) = moon_geocentric(earth.tt);
+        let light_days = LIGHT_DAYS_PER_AU * norm(now_au);
+        let from_earth_au = add_scaled(now_au, -light_days, velocity);
         let earth_then_au = add_scaled(earth.position_au, -light_days, earth.velocity_au_per_day);
         Self {
             body: Body::Moon,

@@ -38,22 +38,35 @@ const OBLIQUITY_FACTOR: f64 = 0.469_7e-6;
 /// Tenths of a microarcsecond in one radian.
 const TABLE_UNITS_PER_RAD: f64 = 1e7 * ARCSEC_PER_RAD;
 
+/// Cosine and sine of the multiples 0 to 4 of an angle: the table has no larger ones, and products are cheaper than calls.
+fn turns(angle_rad: f64) -> [(f64, f64); 5] {
+    let (sin, cos) = sin_cos(angle_rad);
+    let mut turns = [(1.0, 0.0); 5];
+    for index in 1..turns.len() {
+        let (re, im) = turns[index - 1];
+        turns[index] = (re * cos - im * sin, re * sin + im * cos);
+    }
+    turns
+}
+
 /// Nutation at an instant; within 3.6 mas of IAU 2000A from 1800 to 2200.
 pub fn nutation(tt: Tt) -> Nutation {
     let centuries = tt.julian_centuries();
     let arguments_rad = ARGUMENTS_ARCSEC.map(|(at_j2000_arcsec, rate_arcsec)| {
         wrap(at_j2000_arcsec + rate_arcsec * centuries, 1_296_000.0) / ARCSEC_PER_RAD
     });
+    let turns = arguments_rad.map(turns);
     let (mut longitude, mut obliquity) = (0.0, 0.0);
     // Small terms first, so that their sum is not lost in the large ones.
     for term in LUNI_SOLAR.iter().rev() {
-        let argument_rad: f64 = term
-            .multipliers
-            .iter()
-            .zip(arguments_rad)
-            .map(|(&multiplier, rad)| f64::from(multiplier) * rad)
-            .sum();
-        let (sin, cos) = sin_cos(argument_rad);
+        let (mut cos, mut sin) = (1.0, 0.0);
+        for (turns, &multiplier) in turns.iter().zip(&term.multipliers) {
+            if multiplier != 0 {
+                let (re, im) = turns[usize::from(multiplier.unsigned_abs()) % turns.len()];
+                let im = if multiplier < 0 { -im } else { im };
+                (cos, sin) = (cos * re - sin * im, sin * re + cos * im);
+            }
+        }
         let [psi_sin, psi_sin_t, psi_cos, eps_cos, eps_cos_t, eps_sin] =
             term.tenth_microarcsec.map(f64::from);
         longitude += (psi_sin + psi_sin_t * centuries) * sin + psi_cos * cos;

@@ -12,6 +12,7 @@ mod sum;
 #[cfg(test)]
 mod tests;
 
+pub(crate) use moon::moon_of_date_roughly;
 pub use moon::{MoonOfDate, moon_of_date};
 pub use planets::{SeriesBody, State, heliocentric, heliocentric_position_au};
 

@@ -1,5 +1,7 @@
 //! Reader of the packed tables: planar streams of small whole numbers, written by `pkg-config/tables/series.py`.
 
+use crate::quantity::hypotenuse;
+
 /// Powers of time that an argument can carry in each coordinate.
 pub(super) const POWERS: usize = 4;
 /// Coordinates of one series: longitude, latitude, radius.
@@ -47,6 +49,32 @@ pub(super) struct Term {
     pub(super) slot: usize,
     pub(super) cosine_rad: f64,
     pub(super) sine_rad: f64,
+}
+
+impl Series {
+    /// Leaves out the arguments of which no term reaches an amplitude.
+    pub(super) fn keep_terms_of(&mut self, least_rad: f64) {
+        let mut kept = Self {
+            polynomials: std::mem::take(&mut self.polynomials),
+            highest: self.highest,
+            ..Self::default()
+        };
+        let mut factors = std::mem::take(&mut self.factors).into_iter();
+        let mut terms = std::mem::take(&mut self.terms).into_iter();
+        for argument in std::mem::take(&mut self.arguments) {
+            let of_argument: Vec<Term> = terms.by_ref().take(argument.term_count).collect();
+            let its_factors: Vec<Factor> = factors.by_ref().take(argument.factor_count).collect();
+            let is_large = of_argument
+                .iter()
+                .any(|term| hypotenuse(term.cosine_rad, term.sine_rad) >= least_rad);
+            if is_large {
+                kept.factors.extend(its_factors);
+                kept.terms.extend(of_argument);
+                kept.arguments.push(argument);
+            }
+        }
+        *self = kept;
+    }
 }
 
 /// Reads series one after the other from the bytes of a table.

@@ -9,6 +9,7 @@ pub mod exhibit;
 mod host;
 pub mod module;
 mod plain;
+pub mod queries;
 mod scene;
 mod settings;
 mod words;

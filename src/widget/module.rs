@@ -20,19 +20,7 @@ pub fn circumstances(
             &query,
             &["body", "utc", "latitudeDeg", "longitudeDeg", "heightM"],
         )?;
-        let place = match (query.number("latitudeDeg")?, query.number("longitudeDeg")?) {
-            (Some(latitude_deg), Some(longitude_deg)) => Some(Place::new(
-                latitude_deg,
-                longitude_deg,
-                query.number("heightM")?.unwrap_or(0.0),
-            )?),
-            (None, None) => None,
-            _ => {
-                let message =
-                    "A place needs both latitudeDeg (-90 to 90) and longitudeDeg (east positive).";
-                return Err(Error::new(Code::BadPlace, message));
-            }
-        };
+        let place = query.place()?;
         crate::circumstances(
             query.text("body")?.parse()?,
             Utc::parse(&query.text("utc")?)?,
@@ -82,13 +70,13 @@ pub fn series(
 }
 
 /// A query object. A key that is not among those known is refused: a misspelt option must not be ignored.
-struct Query<'a> {
+pub(super) struct Query<'a> {
     object: &'a Object,
     keys: &'a [&'static str],
 }
 
 impl<'a> Query<'a> {
-    fn read(query: &'a JsValue, keys: &'a [&'static str]) -> Result<Self, Error> {
+    pub(super) fn read(query: &'a JsValue, keys: &'a [&'static str]) -> Result<Self, Error> {
         let Some(object) = query.dyn_ref::<Object>() else {
             let message = format!(
                 "The function takes one object with the keys {}.",
@@ -116,14 +104,14 @@ impl<'a> Query<'a> {
         Reflect::get(self.object, &key.into()).unwrap_or(JsValue::UNDEFINED)
     }
 
-    fn text(&self, key: &str) -> Result<String, Error> {
+    pub(super) fn text(&self, key: &str) -> Result<String, Error> {
         self.value(key)
             .as_string()
             .ok_or_else(|| self.unreadable(key, "a text"))
     }
 
     /// A number, or `None` where the key is absent or null.
-    fn number(&self, key: &str) -> Result<Option<f64>, Error> {
+    pub(super) fn number(&self, key: &str) -> Result<Option<f64>, Error> {
         let value = self.value(key);
         if value.is_undefined() || value.is_null() {
             return Ok(None);
@@ -134,7 +122,57 @@ impl<'a> Query<'a> {
             .ok_or_else(|| self.unreadable(key, "a number"))
     }
 
-    fn unreadable(&self, key: &str, wanted: &str) -> Error {
+    /// Yes or no; no where the key is absent or null.
+    pub(super) fn truth(&self, key: &str) -> Result<bool, Error> {
+        let value = self.value(key);
+        if value.is_undefined() || value.is_null() {
+            return Ok(false);
+        }
+        value
+            .as_bool()
+            .ok_or_else(|| self.unreadable(key, "true or false"))
+    }
+
+    /// A list of texts, or an empty one where the key is absent or null.
+    pub(super) fn texts(&self, key: &str) -> Result<Vec<String>, Error> {
+        let value = self.value(key);
+        let mut texts = Vec::new();
+        if value.is_undefined() || value.is_null() {
+            return Ok(texts);
+        }
+        let wanted = "a list of texts";
+        let list = value
+            .dyn_ref::<Array>()
+            .ok_or_else(|| self.unreadable(key, wanted))?;
+        for entry in list.iter() {
+            texts.push(
+                entry
+                    .as_string()
+                    .ok_or_else(|| self.unreadable(key, wanted))?,
+            );
+        }
+        Ok(texts)
+    }
+
+    /// The place of the keys `latitudeDeg`, `longitudeDeg` and `heightM`, where they are given.
+    pub(super) fn place(&self) -> Result<Option<Place>, Error> {
+        match (self.number("latitudeDeg")?, self.number("longitudeDeg")?) {
+            (Some(latitude_deg), Some(longitude_deg)) => Place::new(
+                latitude_deg,
+                longitude_deg,
+                self.number("heightM")?.unwrap_or(0.0),
+            )
+            .map(Some),
+            (None, None) => Ok(None),
+            _ => {
+                let message =
+                    "A place needs both latitudeDeg (-90 to 90) and longitudeDeg (east positive).";
+                Err(Error::new(Code::BadPlace, message))
+            }
+        }
+    }
+
+    pub(super) fn unreadable(&self, key: &str, wanted: &str) -> Error {
         Error::new(
             Code::BadOption,
             format!(

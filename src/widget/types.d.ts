@@ -117,3 +117,123 @@ export interface Series {
   /** Astronomical units. */
   distanceAu: Float64Array;
 }
+
+/** A kind of event by its name; `eventKinds()` gives the definitions. */
+export type EventKind =
+  | "inferior-conjunction" | "superior-conjunction" | "conjunction" | "opposition"
+  | "quadrature-east" | "quadrature-west" | "greatest-elongation-east" | "greatest-elongation-west"
+  | "greatest-illuminated-extent" | "greatest-brightness" | "half-phase"
+  | "station-retrograde" | "station-direct" | "closest-approach" | "perihelion" | "aphelion"
+  | "new-moon" | "first-quarter" | "full-moon" | "last-quarter" | "moon-perigee" | "moon-apogee"
+  | "moon-conjunction" | "moon-closest" | "occultation" | "same-phase"
+  | "planet-conjunction" | "planet-closest" | "transit" | "transit-near-miss";
+
+export interface EventsQuery {
+  /** Start; an event at this instant belongs to the span. As `utc` of `CircumstancesQuery`. */
+  fromUtc: string;
+  /** End; an event at this instant does not belong to the span, so that spans that follow each other share none. */
+  toUtc: string;
+  /** Events in which at least one of these takes part; all when absent. */
+  bodies?: BodyName[];
+  /** All kinds when absent. */
+  kinds?: EventKind[];
+  /** With a longitude: transits and occultations tell what is seen there. */
+  latitudeDeg?: number;
+  longitudeDeg?: number;
+  heightM?: number;
+}
+
+/** Figures of an event, geocentric and of `body`; a key is absent where it has no meaning. */
+export interface EventValues {
+  distanceAu?: number;
+  /** Perihelion and aphelion: geometric distance from the Sun. */
+  sunDistanceAu?: number;
+  elongationDeg?: number;
+  /** Angle between the two bodies; of a transit between the planet and the Sun's centre. */
+  separationDeg?: number;
+  /** Of Mars averaged over its rotation. */
+  magnitude?: number;
+  illuminatedFraction?: number;
+  litAreaArcsec2?: number;
+  angularDiameterArcsec?: number;
+  otherIlluminatedFraction?: number;
+  /** Transits: least angle between the centres in semidiameters of the Sun (959.63 arcsec at 1 au). */
+  separationSunRadii?: number;
+  sunSemidiameterArcsec?: number;
+  /** Transits: position angle of the planet at the Sun's centre, from celestial north through east. */
+  positionAngleDeg?: number;
+  /** Transits: from the first to the last contact. */
+  durationMinutes?: number;
+  /** A lesser peak beside a greater one. */
+  secondary?: true;
+  /** Transits: the whole planet is never inside the Sun's disc. */
+  grazing?: true;
+  waxing?: boolean;
+  otherWaxing?: boolean;
+}
+
+/** An instant within an event. */
+export interface Contact {
+  name: "first-contact" | "second-contact" | "third-contact" | "fourth-contact" | "disappearance" | "reappearance";
+  utc: string;
+  /** Direction of the planet at the Sun's or the Moon's centre, from celestial north through east. */
+  positionAngleDeg: number;
+  /** Seen from a place: altitudes without refraction. */
+  altitudeDeg?: number;
+  sunAltitudeDeg?: number;
+}
+
+export interface SkyEvent {
+  kind: EventKind;
+  body: BodyName;
+  other?: BodyName;
+  utc: string;
+  /** Of a hundred events about one is farther off. */
+  timeUncertaintySeconds: number;
+  values: EventValues;
+  /** Transits: contacts seen from the Earth's centre. */
+  contacts?: Contact[];
+  /** Transits and occultations with a place: how they are seen there; no contacts when they are not. */
+  local?: { aboveHorizon: boolean; contacts: Contact[] };
+}
+
+export interface ApparitionsQuery {
+  body: BodyName;
+  fromUtc: string;
+  toUtc: string;
+  /** Also compare each with those of 1900 to 2100, which takes up to a second. */
+  rank?: boolean;
+}
+
+export interface Apparition {
+  /** Evening and morning of Mercury and Venus; an outer planet is up by night. */
+  side: "evening" | "morning" | "night";
+  /** The conjunctions with the Sun before and after it. */
+  fromUtc: string;
+  toUtc: string;
+  turningPoints: SkyEvent[];
+  /** Smallest magnitude while the planet stands at least 10 degrees from the Sun. */
+  peakMagnitude: number;
+  peakUtc: string;
+  largestElongationDeg: number;
+  largestLitAreaArcsec2: number;
+  /** By peak magnitude among the apparitions of the same side from 1900 to 2100. */
+  rank?: { position: number; of: number; brighterBeforeUtc: string | null; brighterAfterUtc: string | null };
+}
+
+export interface Apparitions {
+  apparitions: Apparition[];
+  rhythm: {
+    meanSynodicPeriodDays: number;
+    /** Shortest and longest of those that end in the span; null when none does. */
+    shortestSynodicPeriodDays: number | null;
+    longestSynodicPeriodDays: number | null;
+    orbitsPerSynodicPeriod: number;
+    orbitalSpeedKmS: number;
+    orbitalSpeedMiS: number;
+    earthOrbitalSpeedKmS: number;
+    earthOrbitalSpeedMiS: number;
+    /** Venus: days by which the fifth inferior conjunction on misses the same date after eight years. */
+    eightYearDriftDays: number | null;
+  };
+}

@@ -8,4 +8,4 @@ export const dist = process.env.WANDERLIGHT_DIST ?? new URL("../../dist", import
 const module = await import(pathToFileURL(join(dist, "wanderlight.js")).href);
 module.initSync({ module: readFileSync(join(dist, "wanderlight.wasm")) });
 
-export const { circumstances, series } = module;
+export const { apparitions, circumstances, eventKinds, events, series } = module;

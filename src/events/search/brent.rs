@@ -3,25 +3,29 @@
 //! Source: R. P. Brent 1973, Algorithms for Minimization without Derivatives, ch. 4 (roots) and ch. 5 (minima), written
 //! from the description of the methods.
 
-use super::search::Found;
+use super::{Found, Sample};
 
 /// Brent's methods need some tens of calls; this bound only guards against a function that contradicts itself.
 const MAX_CALLS: usize = 200;
 
 /// Brent's minimum between `left` and `right` around a lower middle sample.
 pub(super) fn closest_minimum(
-    left_days: f64,
-    middle: Found,
-    right_days: f64,
+    left: Sample,
+    middle: Sample,
+    right: Sample,
     tolerance_days: f64,
     function: &mut dyn FnMut(f64) -> f64,
 ) -> Found {
     // The smaller part of the golden section.
     let golden = 0.5 * (3.0 - 5.0_f64.sqrt());
-    let (mut low, mut high) = (left_days, right_days);
-    // Best, second best and third best points.
-    let (mut best, mut second, mut third) = (middle, middle, middle);
-    let (mut step, mut step_before_last) = (0.0_f64, 0.0_f64);
+    let (mut low, mut high) = (left.days, right.days);
+    // Best, second best and third best points: the samples that enclose the minimum serve the first parabola.
+    let (mut best, mut second, mut third) = if left.value < right.value {
+        (middle, left, right)
+    } else {
+        (middle, right, left)
+    };
+    let (mut step, mut step_before_last) = (high - low, high - low);
     for _ in 0..MAX_CALLS {
         let centre = 0.5 * (low + high);
         let tolerance = tolerance_days
@@ -66,7 +70,7 @@ pub(super) fn closest_minimum(
         };
         // The bounds matter only where days are so large that the tolerance exceeds the bracket.
         let days = (best.days + stride).max(low).min(high);
-        let next = Found {
+        let next = Sample {
             days,
             value: function(days),
         };
@@ -93,13 +97,26 @@ pub(super) fn closest_minimum(
             }
         }
     }
-    best
+    Found {
+        days: best.days,
+        value: best.value,
+        steepness: second_derivative(left, middle, right),
+    }
+}
+
+/// Of the parabola through three samples.
+fn second_derivative(left: Sample, middle: Sample, right: Sample) -> f64 {
+    2.0 * (slope(middle, right) - slope(left, middle)) / (right.days - left.days)
+}
+
+fn slope(left: Sample, right: Sample) -> f64 {
+    (right.value - left.value) / (right.days - left.days)
 }
 
 /// Brent's root between two samples of different sign.
 pub(super) fn closest_root(
-    left: Found,
-    right: Found,
+    left: Sample,
+    right: Sample,
     tolerance_days: f64,
     function: &mut dyn FnMut(f64) -> f64,
 ) -> Found {
@@ -146,7 +163,7 @@ pub(super) fn closest_root(
             tolerance.copysign(half)
         };
         let days = (best.days + stride).max(left.days).min(right.days);
-        best = Found {
+        best = Sample {
             days,
             value: function(days),
         };
@@ -158,5 +175,9 @@ pub(super) fn closest_root(
             (step_before, step) = (best.days - previous.days, best.days - previous.days);
         }
     }
-    best
+    Found {
+        days: best.days,
+        value: best.value,
+        steepness: slope(left, right),
+    }
 }
