@@ -123,13 +123,15 @@ try {
       stage.dispatchEvent(event);
       draw?.();
       draw = undefined;
-      // Reading one pixel back makes the browser carry out what was drawn.
+      const scripted = performance.now() - began;
+      // Reading one pixel back makes the browser carry out what was drawn, and copy the canvas.
       canvas.getContext("2d").getImageData(0, 0, 1, 1);
-      rounds.push(performance.now() - began);
+      rounds.push([scripted, performance.now() - began]);
     }
     window.requestAnimationFrame = request;
     done(rounds.slice(20));`);
-  line("redraw while dragging, 800 x 450 px, density 2, all in", median(redraws), "ms", "goal: at most 6");
+  line("redraw while dragging, 800 x 450 px, density 2", median(redraws.map(([scripted]) => scripted)), "ms", "goal: at most 6");
+  line("  and until its pixels can be read back, painted without a GPU", median(redraws.map(([, painted]) => painted)), "ms", "");
 } finally {
   await page.stop();
 }
