@@ -40,7 +40,8 @@ impl Figures<'_> {
         if !fraction.is_finite() {
             return self.words.own_light().to_owned();
         }
-        let percent = 100.0 * fraction;
+        // A share never exceeds the whole, whatever rounding says.
+        let percent = 100.0 * fraction.min(1.0);
         if percent < 0.05 {
             return self
                 .words
