@@ -6,6 +6,8 @@ mod contract;
 mod curves;
 #[path = "chart/discs.rs"]
 mod discs;
+#[path = "chart/plan.rs"]
+mod plan;
 mod support_chart;
 
 use support_chart::recorder::{Drawn, Seen, record};

@@ -11,6 +11,7 @@ export const template = `
     <label class="slide"><span id="sliderlabel" class="spoken"></span><input id="slider" type="range" step="1"></label>
     <label class="pick"><span id="pickerlabel"></span> <input id="picker" type="date"></label>
     <button id="today" type="button"></button>
+    <button id="play" type="button" hidden><span id="playlabel"></span><span id="steplabel"></span></button>
     <label id="up" class="tick" hidden><input id="horizonup" type="checkbox"><span id="horizonuplabel"></span></label>
     <span id="pickernote" class="note" role="status"></span>
   </div>
@@ -55,6 +56,10 @@ figure {
 :host([view="disc"]) #stage { height: calc(176px + 40cqw); }
 @container (min-width: 506px) { :host([view="disc"]) #stage { height: calc(180px + 28.6cqw); } }
 @container (min-width: 926px) { :host([view="disc"]) #stage { height: min(167px + 22.2cqw, 456px); } }
+:host([view="plan"]) #stage { cursor: grab; height: calc(266px + min(100cqw - 42px, 480px)); }
+@container (min-width: 626px) {
+  :host([view="plan"]) #stage { height: calc(124px + min(100cqw - 50px - clamp(200px, 30cqw - 7.8px, 300px), 480px)); }
+}
 canvas { position: absolute; inset: 0; width: 100%; height: 100%; }
 slot { display: block; height: 100%; overflow: auto; cursor: auto; }
 [data-state="ready"] slot { display: none; }
@@ -62,6 +67,9 @@ slot { display: block; height: 100%; overflow: auto; cursor: auto; }
 [data-state="failed"] :is(canvas, #controls, figcaption, details) { display: none; }
 [data-state="waiting"] :is(#controls, figcaption, details) { visibility: hidden; }
 #controls { display: flex; flex-wrap: wrap; gap: 0.4rem 0.9rem; align-items: center; margin-top: 0.5rem; min-height: 4.75rem; align-content: flex-start; }
+/* On a narrow screen the play button takes a line of its own. */
+:host([view="plan"]) #controls { min-height: 7rem; }
+@container (min-width: 400px) { :host([view="plan"]) #controls { min-height: 4.75rem; } }
 .slide { flex: 1 0 100%; display: block; }
 #slider { width: 100%; margin: 0; box-sizing: border-box; min-height: 1.75rem; accent-color: var(--accent, auto); }
 .tick { display: inline-flex; align-items: center; gap: 0.4rem; min-height: 2rem; }
@@ -72,6 +80,10 @@ button, input:not([type="range"], [type="checkbox"]) {
   border: 1px solid var(--soft, GrayText); border-radius: 0.35rem; color-scheme: var(--scheme, light dark);
 }
 button { cursor: pointer; }
+button[hidden] { display: none; }
+[aria-pressed="true"] { background: var(--accent, Highlight); color: var(--paper, HighlightText); border-color: transparent; }
+#steplabel { display: none; }
+@media (prefers-reduced-motion: reduce) { #steplabel { display: inline; } #playlabel { display: none; } }
 button:hover { border-color: var(--accent, Highlight); }
 :focus-visible { outline: 2px solid var(--accent, Highlight); outline-offset: 2px; }
 /* Room for the longest usual sentences, so that nothing below moves while the date is dragged. */

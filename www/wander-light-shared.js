@@ -39,6 +39,17 @@ export function companions(name, element) {
   return [...(groups.get(name) ?? [])].filter((other) => other !== element);
 }
 
+/** Calls back once, when an element comes near the viewport, until the signal. */
+export function whenNear(element, callback, signal) {
+  const near = new IntersectionObserver((entries) => {
+    if (!entries.some((entry) => entry.isIntersecting)) return;
+    near.disconnect();
+    callback();
+  }, { rootMargin: "600px" });
+  near.observe(element);
+  signal.addEventListener("abort", () => near.disconnect());
+}
+
 /** Calls back when the screen's density changes, until the signal. */
 export function onDensityChange(callback, signal) {
   const change = () => {
@@ -50,6 +61,16 @@ export function onDensityChange(callback, signal) {
 }
 
 export const camelCase = (name) => name.replace(/-(.)/g, (_, letter) => letter.toUpperCase());
+
+/** Takes over properties that a script has set before the element was defined. */
+export function adoptEarlyProperties(element, names) {
+  for (const name of names.map(camelCase)) {
+    if (!Object.hasOwn(element, name)) continue;
+    const value = element[name];
+    delete element[name];
+    element[name] = value;
+  }
+}
 
 /** Gives each attribute a property of the same name, except where there is one already (`date`, `lang`). */
 export function reflectAttributes(prototype, names) {

@@ -4,10 +4,11 @@
 // words and picture into its shadow tree. It computes nothing about the sky and owns no wording.
 
 import { Exhibit } from "./wanderlight.js";
+import { addPlayer, trackPointer } from "./wander-light-motion.js";
 import { fillTable, styles, template } from "./wander-light-shadow.js";
 import {
-  brokenMessage, camelCase, companions, devicePosition, joinGroup, leaveGroup, loadModule, onDensityChange,
-  reflectAttributes, surroundings,
+  adoptEarlyProperties, brokenMessage, camelCase, companions, devicePosition, joinGroup, leaveGroup, loadModule,
+  onDensityChange, reflectAttributes, surroundings, whenNear,
 } from "./wander-light-shared.js";
 
 const SETTINGS = ["body", "view", "date", "span", "place", "zone", "lang", "theme", "units", "group"];
@@ -19,23 +20,17 @@ class WanderLight extends HTMLElement {
   #parts;
   #group;
   #cleanup;
+  #player;
   #frame = 0;
   #resume = {};
   #reported = new Set();
 
   connectedCallback() {
-    for (const name of SETTINGS.map(camelCase)) this.#adoptEarlyProperty(name);
+    adoptEarlyProperties(this, SETTINGS);
     if (!this.#parts) this.#buildShadow();
     this.#joinGroup();
     this.#cleanup = new AbortController();
-    // Loading starts when the element comes near the viewport.
-    const near = new IntersectionObserver((entries) => {
-      if (!entries.some((entry) => entry.isIntersecting)) return;
-      near.disconnect();
-      this.#start();
-    }, { rootMargin: "600px" });
-    near.observe(this);
-    this.#cleanup.signal.addEventListener("abort", () => near.disconnect());
+    whenNear(this, () => this.#start(), this.#cleanup.signal);
   }
 
   disconnectedCallback() {
@@ -53,6 +48,7 @@ class WanderLight extends HTMLElement {
     if (before === after) return;
     if (name === "date" || name === "place") delete this.#resume[name];
     if (name === "group" && this.isConnected) this.#joinGroup();
+    this.#player?.stop();
     if (this.#exhibit) this.#guard(() => this.#configure());
   }
 
@@ -70,13 +66,6 @@ class WanderLight extends HTMLElement {
     // A second setting of the same text must still move a date that was dragged away.
     if (this.getAttribute("date") === String(value)) this.attributeChangedCallback("date", null, value);
     else this.setAttribute("date", value);
-  }
-
-  #adoptEarlyProperty(name) {
-    if (!Object.hasOwn(this, name)) return;
-    const value = this[name];
-    delete this[name];
-    this[name] = value;
   }
 
   #buildShadow() {
@@ -124,6 +113,7 @@ class WanderLight extends HTMLElement {
     for (const [name, colour] of Object.entries(palette)) p.figure.style.setProperty(`--${name}`, colour);
     for (const [id, text] of Object.entries(labels)) p[id].textContent = text;
     p.up.hidden = view !== "disc" || !hasPlace;
+    p.play.hidden = view !== "plan";
   }
 
   /** The parts that change with the date. */
@@ -164,19 +154,28 @@ class WanderLight extends HTMLElement {
 
   #listen(signal) {
     const p = this.#parts;
-    const on = (target, type, handler) => target.addEventListener(type, (event) => this.#guard(() => handler(event)), { signal });
+    const on = (target, type, handler, options) =>
+      target.addEventListener(type, (event) => this.#guard(() => handler(event)), { ...options, signal });
 
-    on(p.stage, "pointerdown", (event) => {
-      if (event.button !== 0) return;
-      p.stage.setPointerCapture(event.pointerId);
-      // The slider is the keyboard twin of the drag, so arrow keys go on from where the finger stopped.
-      p.slider.focus({ preventScroll: true });
-      event.preventDefault();
-      this.#drag(event);
-    });
-    on(p.stage, "pointermove", (event) => {
-      if (p.stage.hasPointerCapture(event.pointerId)) this.#drag(event);
-    });
+    trackPointer(p.stage, {
+      press: (x, y) => {
+        // The slider is the keyboard twin of the drag, so arrow keys go on from where the finger stopped.
+        p.slider.focus({ preventScroll: true });
+        return this.#exhibit.grab(x, y);
+      },
+      drag: (x, y) => this.#moved(this.#exhibit.drag(x, y)),
+    }, on);
+    this.#player = addPlayer(p, {
+      begin: () => this.#moved(this.#exhibit.begin_round()),
+      play: (seconds) => this.#guard(() => {
+        const goesOn = this.#exhibit.play(seconds);
+        this.#requestDraw();
+        return goesOn;
+      }),
+      tell: () => this.#guard(() => this.#moved(true)),
+      rest: () => this.#guard(() => this.#moved((this.#exhibit.rest(), true))),
+      step: () => this.#moved(this.#exhibit.step_round()),
+    }, on, signal);
     on(p.slider, "keydown", (event) => {
       if (event.altKey || event.ctrlKey || event.metaKey) return;
       if (!this.#exhibit.knows_key(event.key)) return;
@@ -205,10 +204,6 @@ class WanderLight extends HTMLElement {
     onDensityChange(() => this.#requestDraw(), signal);
   }
 
-  #drag(event) {
-    this.#moved(this.#exhibit.choose_at(event.clientX - this.#parts.stage.getBoundingClientRect().left));
-  }
-
   /** The visitor moved the date: show it, tell the page, take the group along. */
   #moved(changed) {
     if (!changed) return;
@@ -222,6 +217,7 @@ class WanderLight extends HTMLElement {
     this.#resume.date = date;
     // One that is not loaded yet begins at this date when it is.
     if (!this.#exhibit) return;
+    this.#player?.stop();
     this.#guard(() => {
       if (!this.#exhibit.choose_date(date).changed) return;
       this.#show();
@@ -269,7 +265,7 @@ class WanderLight extends HTMLElement {
   /** Runs calls into the module; whatever goes wrong there stays inside this element. */
   #guard(action) {
     try {
-      action();
+      return action();
     } catch (error) {
       this.#giveUp(error.code ?? "broken", error.code ? error.message : brokenMessage, error);
     }

@@ -8,6 +8,7 @@ mod disc;
 mod handle;
 mod ink;
 mod pen;
+mod plan;
 mod shapes;
 #[cfg(not(target_arch = "wasm32"))]
 mod svg;
@@ -15,6 +16,7 @@ mod theme;
 mod tradeoff;
 
 pub use disc::{DiscModel, DiscSample};
+pub use plan::{PlanGrip, PlanMark, PlanModel, PlanPaths, PlanSample};
 #[cfg(not(target_arch = "wasm32"))]
 pub use svg::to_svg;
 pub use theme::{Colour, Theme};
@@ -68,6 +70,8 @@ pub enum Picture {
     Tradeoff(TradeoffModel),
     /// The disc to scale through the days.
     Disc(DiscModel),
+    /// Sun, Earth and planet from above.
+    Plan(Box<PlanModel>),
 }
 
 impl Picture {
@@ -76,6 +80,7 @@ impl Picture {
         match self {
             Picture::Tradeoff(_) => tradeoff::preferred_height(width_css),
             Picture::Disc(_) => disc::preferred_height(width_css),
+            Picture::Plan(_) => plan::preferred_height(width_css),
         }
     }
 
@@ -92,6 +97,7 @@ impl Picture {
         let least_height = match self {
             Picture::Tradeoff(_) => tradeoff::least_height(view.width_css),
             Picture::Disc(_) => disc::least_height(view.width_css),
+            Picture::Plan(_) => plan::least_height(view.width_css),
         };
         let large = view.width_css >= MIN_WIDTH_CSS && view.height_css >= least_height;
         if !(large && view.density > 0.0 && view.density.is_finite() && view.subpixels > 0) {
@@ -109,6 +115,7 @@ impl Picture {
         match self {
             Picture::Tradeoff(model) => tradeoff::draw(model, &mut pen, view, theme)?,
             Picture::Disc(model) => disc::draw(model, &mut pen, view, theme)?,
+            Picture::Plan(model) => plan::draw(model, &mut pen, view, theme)?,
         }
         Ok(())
     }
@@ -129,6 +136,7 @@ impl Picture {
         match self {
             Picture::Tradeoff(model) => (model.span, tradeoff::plot_edges(view.width_css)),
             Picture::Disc(model) => (model.span, disc::lane_edges(view.width_css)),
+            Picture::Plan(model) => (model.span, plan::lane_edges(view.width_css)),
         }
     }
 }

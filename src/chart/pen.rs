@@ -210,6 +210,16 @@ impl<'a> Pen<'a> {
         Ok(true)
     }
 
+    /// Keeps texts off a box (left, top, right, bottom) in which something else is drawn.
+    pub(super) fn keep_clear(&mut self, bounds: [f64; 4]) {
+        self.taken.push(bounds);
+    }
+
+    /// Height that a text of this face takes.
+    pub(super) fn text_height(face: Face) -> f64 {
+        face.size * LINE
+    }
+
     fn look(&self, face: Face, align: Align) -> TextLook {
         TextLook {
             size: face.size * self.scale,

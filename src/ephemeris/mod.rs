@@ -6,8 +6,10 @@
 mod earth;
 mod light;
 mod observation;
+mod plan;
 mod span;
 
 pub use earth::Earth;
 pub use observation::Observation;
+pub use plan::{PlanPointAu, PlanPositions, Traveller, plan_orbit, plan_passage, plan_positions};
 pub use span::{SpanPart, check_span};

@@ -1,8 +1,11 @@
 //! The pictures' phrases in English.
 
+use super::english_plan;
 use super::english_sentences as sentences;
+use super::plan::{PlanLabels, PlanStory};
 use super::words::{Column, DiscStory, Orientation, Story, Told, Words};
 use crate::body::Body;
+use crate::events::Kind;
 
 /// English.
 #[derive(Debug, Clone, Copy, PartialEq, Eq, Default)]
@@ -224,6 +227,34 @@ impl Words for English {
 
     fn picture_disc(&self, body: Body) -> String {
         format!("The disc of {} to scale on several dates", self.body(body))
+    }
+
+    fn picture_plan(&self, body: Body) -> String {
+        format!(
+            "Sun, Earth and {} seen from the north of the Earth’s orbit",
+            self.body(body)
+        )
+    }
+
+    fn plan_labels(&self) -> PlanLabels {
+        english_plan::LABELS
+    }
+
+    fn elongation(&self, angle: &str) -> String {
+        format!("elongation {angle}")
+    }
+
+    fn turning_point(&self, kind: Kind) -> String {
+        // The contract's names are the English terms with hyphens.
+        kind.name().replace('-', " ")
+    }
+
+    fn dated(&self, name: &str, date: &str) -> String {
+        format!("{name}: {date}")
+    }
+
+    fn plan(&self, body: Body, story: PlanStory, told: &Told, elongation: &str) -> String {
+        english_plan::sentence(self.body(body), story, told, elongation)
     }
 }
 

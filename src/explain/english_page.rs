@@ -30,6 +30,8 @@ impl PageWords for English {
             ("sliderlabel", "Date, by day"),
             ("pickerlabel", "Date"),
             ("today", "Today"),
+            ("playlabel", "Play"),
+            ("steplabel", "Step on"),
             ("horizonuplabel", "Horizon up"),
             ("numberslabel", "The same in numbers"),
             ("latitudelabel", "Latitude"),

@@ -5,10 +5,12 @@
 
 mod english;
 mod english_page;
+mod english_plan;
 mod english_sentences;
 mod figures;
 mod formats;
 mod page;
+mod plan;
 mod reading;
 mod sentence;
 mod table;
@@ -18,6 +20,8 @@ pub use english::English;
 pub use figures::{AreaScale, Figures};
 pub use formats::{DateForm, EnglishFormats, Formats};
 pub use page::{DistanceTold, Label, NightEdge, Outlook, PageWords, SpotName, Units};
+pub(crate) use plan::elongation;
+pub use plan::{PlanLabels, PlanStory, sentence_plan};
 pub use reading::{GreatestExtent, Highlights, Peak, Reading};
 pub(crate) use sentence::{MOON_WIDTH_ARCSEC, moon_divisor};
 pub use sentence::{announce, sentence_disc, sentence_tradeoff};

@@ -121,7 +121,7 @@ pub(crate) fn moon_divisor(arcsec: f64, figures: Figures<'_>) -> String {
     figures.number((times / step).round() * step, 0)
 }
 
-fn told(reading: &Reading, figures: Figures<'_>) -> Told {
+pub(super) fn told(reading: &Reading, figures: Figures<'_>) -> Told {
     Told {
         date: figures.date(reading.utc, DateForm::Day),
         lit: figures.lit_share(reading.illuminated_fraction),

@@ -2,7 +2,9 @@
 //!
 //! Numbers, dates and units arrive as finished strings. `English` in `english.rs` is the reference.
 
+use super::plan::{PlanLabels, PlanStory};
 use crate::body::Body;
+use crate::events::Kind;
 
 /// Ready strings about one instant.
 #[derive(Debug, Clone, PartialEq, Eq)]
@@ -186,4 +188,17 @@ pub trait Words {
     fn picture_tradeoff(&self, body: Body) -> String;
     /// Accessible name of the disc picture.
     fn picture_disc(&self, body: Body) -> String;
+    /// Accessible name of the plan.
+    fn picture_plan(&self, body: Body) -> String;
+
+    /// The plan's fixed words.
+    fn plan_labels(&self) -> PlanLabels;
+    /// The angle from the Sun at the Earth, with its name.
+    fn elongation(&self, angle: &str) -> String;
+    /// The name of a turning point.
+    fn turning_point(&self, kind: Kind) -> String;
+    /// A turning point with its date.
+    fn dated(&self, name: &str, date: &str) -> String;
+    /// Where the planet stands, and what that makes of its lit half.
+    fn plan(&self, body: Body, story: PlanStory, told: &Told, elongation: &str) -> String;
 }

@@ -12,7 +12,7 @@ use super::plain::{self, put};
 use super::scene::Scene;
 use super::settings::{Settings, Spot, View, frame_around, read_date};
 use super::words::{self, iso_date};
-use crate::chart::Viewport;
+use crate::chart::{PlanGrip, Viewport};
 use crate::error::Error;
 use crate::explain::Table;
 use crate::place::{self, Coordinate, Place};
@@ -23,14 +23,16 @@ const PAGE_DAYS: i64 = 7;
 /// The thinking part of one `<wander-light>`; the element class owns one while it is in a page.
 #[wasm_bindgen]
 pub struct Exhibit {
-    host: Host,
-    settings: Settings,
+    pub(super) host: Host,
+    pub(super) settings: Settings,
     /// First and last day shown.
-    frame: (Day, Day),
-    scene: Scene,
-    horizon_up: bool,
-    /// Width of the last drawing, for positions of the pointer.
-    width_css: f64,
+    pub(super) frame: (Day, Day),
+    pub(super) scene: Scene,
+    pub(super) horizon_up: bool,
+    /// The last drawing's, for positions of the pointer.
+    pub(super) viewport: Viewport,
+    /// What the pointer holds.
+    pub(super) grip: Option<PlanGrip>,
 }
 
 #[wasm_bindgen]
@@ -46,9 +48,9 @@ impl Exhibit {
     /// Reads all attributes anew; returns a list of `{ attribute, code, message }` of those that cannot be used.
     pub fn configure(&mut self, attributes: JsValue) -> Result<Array, JsValue> {
         let (exhibit, problems) = Self::build(&Attributes::new(attributes)).map_err(thrown)?;
-        let (horizon_up, width_css) = (self.horizon_up, self.width_css);
+        let (horizon_up, viewport, grip) = (self.horizon_up, self.viewport, self.grip);
         *self = exhibit;
-        self.width_css = width_css;
+        (self.viewport, self.grip) = (viewport, grip);
         if horizon_up {
             self.turn_disc(true)?;
         }
@@ -63,8 +65,8 @@ impl Exhibit {
         height_css: f64,
         density: f64,
     ) -> Result<Vec<f64>, JsValue> {
-        self.width_css = width_css;
         let view = Viewport::new(width_css, height_css, density);
+        self.viewport = view;
         let picture = &self.scene.picture;
         paint(canvas, picture, &view, &self.settings.theme).map_err(thrown)?;
         let end = |day| picture.x_of_date(self.host.noon(day), &view);
@@ -123,15 +125,6 @@ impl Exhibit {
         let marked = marked.map_or(JsValue::NULL, |row| JsValue::from_f64(row as f64));
         put(&object, "marked", &marked);
         object
-    }
-
-    /// Moves to the date under a pointer, `x_css` from the left edge of the canvas.
-    pub fn choose_at(&mut self, x_css: f64) -> Result<bool, JsValue> {
-        let view = Viewport::new(self.width_css, 0.0, 1.0);
-        match self.scene.picture.date_at(x_css, &view) {
-            Some(utc) => self.move_to(self.host.day_of(utc).clamp(self.frame.0, self.frame.1)),
-            None => Ok(false),
-        }
     }
 
     /// Whether a key moves the date.
@@ -207,7 +200,8 @@ impl Exhibit {
                 frame,
                 scene,
                 horizon_up: false,
-                width_css: 0.0,
+                viewport: Viewport::new(0.0, 0.0, 1.0),
+                grip: None,
             },
             problems,
         ))
@@ -227,7 +221,7 @@ impl Exhibit {
     }
 
     /// Chooses a day; one outside the frame takes the frame along. Answers whether anything moved.
-    fn move_to(&mut self, day: Day) -> Result<bool, JsValue> {
+    pub(super) fn move_to(&mut self, day: Day) -> Result<bool, JsValue> {
         if day == self.settings.day {
             return Ok(false);
         }

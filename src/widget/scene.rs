@@ -1,6 +1,7 @@
 //! What an element shows: the samples of its frame, the reading of its day, and the picture made of both.
 
 use super::host::{Day, Host};
+use super::plan::{plan_model, plan_sample};
 use super::settings::{Settings, View};
 use crate::Body;
 use crate::chart::{DiscModel, DiscSample, Picture, TradeoffModel};
@@ -71,6 +72,7 @@ impl Scene {
                     figures,
                 ))
             }
+            View::Plan => Picture::Plan(Box::new(plan_model(&series, utc, &now, figures)?)),
         };
         Ok(Self {
             utc,
@@ -88,7 +90,18 @@ impl Scene {
         host: &Host,
         horizon_up: bool,
     ) -> Result<(), Error> {
-        self.utc = host.noon(settings.day);
+        self.set_instant(host.noon(settings.day), settings, host, horizon_up)
+    }
+
+    /// Moves to an instant of the settings' day.
+    pub(super) fn set_instant(
+        &mut self,
+        utc: Utc,
+        settings: &Settings,
+        host: &Host,
+        horizon_up: bool,
+    ) -> Result<(), Error> {
+        self.utc = utc;
         self.now = circumstances(settings.body, self.utc, settings.spot.place())?;
         match &mut self.picture {
             Picture::Tradeoff(model) => model.set_chosen(self.utc, &self.now, figures(host)),
@@ -97,6 +110,10 @@ impl Scene {
                     &disc_sample(settings, self.utc, &self.now, horizon_up),
                     figures(host),
                 );
+            }
+            Picture::Plan(model) => {
+                let chosen = plan_sample(settings.body, self.utc, &self.now)?;
+                model.set_chosen(&chosen, figures(host));
             }
         }
         Ok(())

@@ -16,6 +16,8 @@ pub(super) enum View {
     Tradeoff,
     /// The disc to scale through the days.
     Disc,
+    /// Sun, Earth and planet from above.
+    Plan,
 }
 
 impl View {
@@ -23,6 +25,7 @@ impl View {
         match self {
             View::Tradeoff => "tradeoff",
             View::Disc => "disc",
+            View::Plan => "plan",
         }
     }
 }
@@ -74,11 +77,12 @@ impl Settings {
             problems: Vec::new(),
         };
         let body = reading.pick("body", Body::Venus, read_body);
+        let view = reading.pick("view", View::Tradeoff, |text| read_view(text, body));
         let settings = Self {
             body,
-            view: reading.pick("view", View::Tradeoff, read_view),
+            view,
             day: reading.pick("date", host.today(), |text| read_date(text, host)),
-            span_days: reading.pick("span", default_span_days(body), read_span),
+            span_days: reading.pick("span", default_span_days(body, view), read_span),
             spot: reading.pick("place", rough_spot(host.zone()), |text| {
                 read_spot(text, host.zone())
             }),
@@ -123,11 +127,18 @@ fn read_body(text: &str) -> Result<Body, Error> {
     }
 }
 
-fn read_view(text: &str) -> Result<View, Error> {
-    [View::Tradeoff, View::Disc]
+fn read_view(text: &str, body: Body) -> Result<View, Error> {
+    let view = [View::Tradeoff, View::Disc, View::Plan]
         .into_iter()
         .find(|view| view.name() == text)
-        .ok_or_else(|| not_among("view", text, "tradeoff, disc"))
+        .ok_or_else(|| not_among("view", text, "tradeoff, disc, plan"))?;
+    if view == View::Plan && !Body::PLANETS.contains(&body) {
+        return Err(Error::new(
+            Code::BadOption,
+            "The plan shows a planet on its way around the Sun; choose one from mercury to neptune.",
+        ));
+    }
+    Ok(view)
 }
 
 fn read_units(text: &str) -> Result<Units, Error> {
@@ -202,13 +213,30 @@ pub(super) fn frame_around(day: Day, span_days: i64) -> (Day, Day) {
 }
 
 /// Long enough to show how a round of phases rises and falls, short enough to read a day.
-const fn default_span_days(body: Body) -> i64 {
+const fn default_span_days(body: Body, view: View) -> i64 {
+    if matches!(view, View::Plan) {
+        return synodic_days(body);
+    }
     match body {
         Body::Moon => 34,
         Body::Mercury => 130,
         Body::Venus => 330,
         Body::Mars => 460,
         _ => 400,
+    }
+}
+
+/// Mean time after which a planet stands again at the same angle from the Sun, in whole days: 1 / |1/P - 1/365.256|
+/// with the sidereal periods P of the mean motions in `series`.
+pub(super) const fn synodic_days(body: Body) -> i64 {
+    match body {
+        Body::Mercury => 116,
+        Body::Venus => 584,
+        Body::Mars => 780,
+        Body::Jupiter => 399,
+        Body::Saturn => 378,
+        Body::Uranus => 370,
+        _ => 367,
     }
 }
 

@@ -12,7 +12,7 @@ use crate::circumstances::circumstances;
 use crate::events::{civil_dawn, civil_dusk};
 use crate::explain::{
     DistanceTold, English, NightEdge, Outlook, PageWords, SpotName, Words, announce, sentence_disc,
-    sentence_tradeoff,
+    sentence_plan, sentence_tradeoff,
 };
 use crate::quantity::AU_KM;
 use crate::time::Utc;
@@ -93,6 +93,10 @@ pub(super) fn state(
         View::Disc => (
             sentence_disc(body, scene.utc, &scene.now, figures),
             English.picture_disc(body),
+        ),
+        View::Plan => (
+            sentence_plan(body, scene.utc, &scene.now, figures),
+            English.picture_plan(body),
         ),
     };
     let mut place = distance(settings, host, scene);

@@ -2,6 +2,7 @@
 //! curves have true shapes without the ephemeris. Its figures are not meant to be the real ones.
 #![allow(dead_code)] // each test file uses its own share
 
+pub(crate) mod plan;
 pub(crate) mod recorder;
 
 use wanderlight::chart::{DiscModel, DiscSample, Picture, TradeoffModel};
@@ -27,7 +28,7 @@ pub(crate) fn day(year: i32, month: u8, day: u8) -> Utc {
 }
 
 /// Orbit radius in au, period in days, diameter at 1 au in arcsec, day of a conjunction with the Earth's longitude.
-fn orbit(body: Body) -> (f64, f64, f64, f64) {
+pub(crate) fn orbit(body: Body) -> (f64, f64, f64, f64) {
     match body {
         Body::Mercury => (0.387, 87.97, 6.73, 9805.0),
         Body::Venus => (0.7233, 224.70, 16.69, day(2026, 10, 24).days_since_j2000()),

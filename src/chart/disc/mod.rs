@@ -4,22 +4,23 @@
 //! Saturn's globe is flattened and its rings stand at their true opening and angle; shadows of the one on the other
 //! are not drawn, nor is the flattening of Jupiter, Uranus and Neptune (at most 6 %).
 
+mod globe;
 mod layout;
 mod model;
 
+pub(super) use globe::{Look, globe};
 pub(super) use layout::{lane_edges, least_height, preferred_height};
+pub(super) use model::{Disc, RING_EDGE};
 pub use model::{DiscModel, DiscSample};
 
 use super::Viewport;
 use super::handle;
 use super::ink::Failed;
 use super::pen::{Align, Pen, Point, bold, plain};
-use super::shapes::{RingHalf, circle, flatten, half_ring, lit_part, placed, rising_limb};
-use super::theme::{Colour, Theme};
+use super::shapes::rising_limb;
+use super::theme::Theme;
 use crate::explain::MOON_WIDTH_ARCSEC;
-use crate::quantity::{hypotenuse, sin_cos};
 use layout::Layout;
-use model::Disc;
 
 pub(super) fn draw(
     model: &DiscModel,
@@ -124,57 +125,6 @@ fn moon_edge(
     let y = (layout.moon_y + layout.row_top) / 2.0 + 2.0;
     pen.text(label, (apex.0, y), Align::Middle, face)?;
     Ok(())
-}
-
-struct Look {
-    lit: Colour,
-    night: Colour,
-    limb: Colour,
-    ring: Colour,
-    line: f64,
-}
-
-/// Saturn's rings in equatorial radii (60,268 km): C and B from 74,500 to 117,580 km, A from 122,170 to 136,780 km.
-const RINGS: [(f64, f64); 2] = [
-    (74_500.0 / 60_268.0, 117_580.0 / 60_268.0),
-    (122_170.0 / 60_268.0, model::RING_EDGE),
-];
-
-/// Polar over equatorial radius of Saturn: 54,364 km over 60,268 km.
-const SATURN_POLAR: f64 = 54_364.0 / 60_268.0;
-
-fn globe(disc: &Disc, pen: &mut Pen<'_>, at: Point, scale: f64, look: &Look) -> Result<(), Failed> {
-    let radius = disc.radius_arcsec * scale;
-    let mut lit = lit_part(disc.lit_fraction, disc.towards_sun);
-    let Some(ring) = disc.ring else {
-        pen.disc(at, radius, look.night)?;
-        pen.area(&placed(&lit, at, radius), look.lit)?;
-        return pen.ring(at, radius, look.line, look.limb);
-    };
-    let rings = |pen: &mut Pen<'_>, half: RingHalf| {
-        RINGS.iter().try_for_each(|&(inner, outer)| {
-            pen.area(
-                &placed(
-                    &half_ring(inner, outer, ring.opening_deg, ring.pole, half),
-                    at,
-                    radius,
-                ),
-                look.ring,
-            )
-        })
-    };
-    rings(pen, RingHalf::Far)?;
-    let (sin, cos) = sin_cos(ring.opening_deg.to_radians());
-    let apparent_polar = hypotenuse(sin, SATURN_POLAR * cos);
-    let mut outline = circle();
-    flatten(&mut outline, ring.pole, apparent_polar);
-    flatten(&mut lit, ring.pole, apparent_polar);
-    let mut outline = placed(&outline, at, radius);
-    pen.area(&outline, look.night)?;
-    pen.area(&placed(&lit, at, radius), look.lit)?;
-    outline.extend_from_within(..1);
-    pen.line(&outline, look.line, look.limb)?;
-    rings(pen, RingHalf::Near)
 }
 
 /// The chosen readings on the side of the disc that has more room.

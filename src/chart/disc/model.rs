@@ -12,7 +12,7 @@ use crate::time::Utc;
 const ROWS: [usize; 3] = [5, 7, 9];
 
 /// Outer edge of Saturn's A ring in equatorial radii of the planet: 136,780 km over 60,268 km.
-pub(super) const RING_EDGE: f64 = 136_780.0 / 60_268.0;
+pub(in crate::chart) const RING_EDGE: f64 = 136_780.0 / 60_268.0;
 
 /// Lengths that a scale bar may have.
 const BARS_ARCSEC: [f64; 10] = [1.0, 2.0, 5.0, 10.0, 20.0, 30.0, 60.0, 120.0, 300.0, 600.0];
@@ -45,20 +45,20 @@ pub struct DiscModel {
 }
 
 #[derive(Debug, Clone)]
-pub(super) struct Disc {
-    pub(super) day: f64,
-    pub(super) lit_fraction: f64,
-    pub(super) radius_arcsec: f64,
+pub(in crate::chart) struct Disc {
+    pub(in crate::chart) day: f64,
+    pub(in crate::chart) lit_fraction: f64,
+    pub(in crate::chart) radius_arcsec: f64,
     /// Direction in the picture of the middle of the lit limb.
-    pub(super) towards_sun: Point,
-    pub(super) ring: Option<Ring>,
-    pub(super) date: String,
-    pub(super) lit: String,
-    pub(super) size: String,
+    pub(in crate::chart) towards_sun: Point,
+    pub(in crate::chart) ring: Option<Ring>,
+    pub(in crate::chart) date: String,
+    pub(in crate::chart) lit: String,
+    pub(in crate::chart) size: String,
 }
 
 #[derive(Debug, Clone, Copy)]
-pub(super) struct Ring {
+pub(in crate::chart) struct Ring {
     /// Direction in the picture of the north pole of the rings.
     pub(super) pole: Point,
     pub(super) opening_deg: f64,
@@ -155,7 +155,7 @@ impl DiscModel {
 }
 
 impl Disc {
-    fn new(sample: &DiscSample<'_>, figures: Figures<'_>) -> Disc {
+    pub(in crate::chart) fn new(sample: &DiscSample<'_>, figures: Figures<'_>) -> Disc {
         let facts = sample.circumstances;
         let up = sample.up_angle_deg;
         let ring = facts.axis_angle_deg.zip(facts.ring_opening_deg);
@@ -178,7 +178,7 @@ impl Disc {
     }
 
     /// Full extent, rings included.
-    pub(super) fn extent_arcsec(&self) -> f64 {
+    pub(in crate::chart) fn extent_arcsec(&self) -> f64 {
         2.0 * self.radius_arcsec * if self.ring.is_some() { RING_EDGE } else { 1.0 }
     }
 }
