@@ -10,7 +10,7 @@ mod model;
 
 pub(super) use globe::{Look, globe};
 pub(super) use layout::{lane_edges, least_height, preferred_height};
-pub(super) use model::{Disc, RING_EDGE};
+pub(super) use model::{Disc, breadth, widest_arcsec};
 pub use model::{DiscModel, DiscSample};
 
 use super::Viewport;

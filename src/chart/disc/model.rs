@@ -14,6 +14,20 @@ const ROWS: [usize; 3] = [5, 7, 9];
 /// Outer edge of Saturn's A ring in equatorial radii of the planet: 136,780 km over 60,268 km.
 pub(in crate::chart) const RING_EDGE: f64 = 136_780.0 / 60_268.0;
 
+/// Largest diameter in a span; above zero, so that scales can be made of it.
+pub(in crate::chart) fn widest_arcsec(series: &Series) -> f64 {
+    series
+        .angular_diameter_arcsec
+        .iter()
+        .copied()
+        .fold(f64::MIN_POSITIVE, f64::max)
+}
+
+/// How far a body reaches with its rings, in diameters of its globe.
+pub(in crate::chart) fn breadth(body: Body) -> f64 {
+    if body == Body::Saturn { RING_EDGE } else { 1.0 }
+}
+
 /// Lengths that a scale bar may have.
 const BARS_ARCSEC: [f64; 10] = [1.0, 2.0, 5.0, 10.0, 20.0, 30.0, 60.0, 120.0, 300.0, 600.0];
 
@@ -93,16 +107,7 @@ impl DiscModel {
                 .map(|sample| Disc::new(sample, figures))
                 .collect::<Vec<_>>()
         });
-        let widest = series
-            .angular_diameter_arcsec
-            .iter()
-            .copied()
-            .fold(f64::MIN_POSITIVE, f64::max);
-        let breadth = if series.body == Body::Saturn {
-            RING_EDGE
-        } else {
-            1.0
-        };
+        let widest = widest_arcsec(series);
         let bar = |&arcsec: &f64| {
             let length = if arcsec < 60.0 {
                 words.arcseconds_short(&figures.number(arcsec, 0))
@@ -118,7 +123,7 @@ impl DiscModel {
             span: Span::of(&series.utc),
             // The Moon itself and the Sun are as large as the scale that it would give.
             moon_edge: (widest < MOON_WIDTH_ARCSEC / 2.0).then(|| words.moon_edge()),
-            largest_extent_arcsec: widest * breadth,
+            largest_extent_arcsec: widest * breadth(series.body),
             rows,
             chosen: Disc::new(chosen, figures),
             chosen_date: String::new(),

@@ -2,11 +2,10 @@
 
 use super::super::Viewport;
 use super::super::axis::{DateAxis, Span};
-use super::super::disc::{Disc, DiscSample, RING_EDGE};
+use super::super::disc::{Disc, DiscSample, breadth, widest_arcsec};
 use super::super::pen::Point;
 use super::layout::Layout;
 use super::projection::Projection;
-use crate::body::Body;
 use crate::circumstances::Series;
 use crate::explain::{DateForm, Figures, PlanLabels, Reading, elongation};
 use crate::quantity::hypotenuse;
@@ -97,16 +96,7 @@ impl PlanModel {
         figures: Figures<'_>,
     ) -> PlanModel {
         let span = Span::of(&series.utc);
-        let widest_arcsec = series
-            .angular_diameter_arcsec
-            .iter()
-            .copied()
-            .fold(f64::MIN_POSITIVE, f64::max);
-        let breadth = if series.body == Body::Saturn {
-            RING_EDGE
-        } else {
-            1.0
-        };
+        let widest_arcsec = widest_arcsec(series);
         let mark = |mark: &PlanMark| Mark {
             day: mark.utc.days_since_j2000(),
             planet_au: mark.planet_au,
@@ -128,7 +118,7 @@ impl PlanModel {
             labels: figures.words.plan_labels(),
             name: figures.words.body_heading(series.body),
             largest_radius_arcsec: widest_arcsec / 2.0,
-            largest_extent_arcsec: widest_arcsec * breadth,
+            largest_extent_arcsec: widest_arcsec * breadth(series.body),
             chosen: Chosen::new(chosen, figures),
         }
     }
